@@ -1,0 +1,50 @@
+namespace Selector.Engine.Quantities;
+
+/// <summary>How a unit is written: with SI prefixes, as it stands, or as a fraction shown in per cent.</summary>
+public enum UnitScale
+{
+    /// <summary>Takes SI prefixes: 4.7 µF, 10 kΩ.</summary>
+    Prefixed,
+
+    /// <summary>Never takes a prefix: °C, K/W, h.</summary>
+    Plain,
+
+    /// <summary>Kept as a fraction, written and read in per cent.</summary>
+    Percent,
+}
+
+/// <summary>A unit of measure: the sign that is written after the number, and how numbers carry it.</summary>
+/// <param name="Symbol">The sign as printed, for example "Ω"; empty for a pure number.</param>
+/// <param name="Name">The name in words, for messages: "ohm".</param>
+/// <param name="Scale">Whether prefixes or per cent apply.</param>
+/// <param name="Key">The last part of a column name in files: "ohm". ASCII, lower case, letters, digits and underscore.</param>
+/// <param name="Spellings">Other ways in which people type it; compared without regard to case unless the spelling has upper case letters.</param>
+public sealed record Unit(string Symbol, string Name, UnitScale Scale, string Key, params string[] Spellings)
+{
+    /// <inheritdoc/>
+    public override string ToString() => Symbol;
+}
+
+/// <summary>The units of this product.</summary>
+public static class Units
+{
+    public static readonly Unit Volt = new("V", "volt", UnitScale.Prefixed, "v", "volt", "volts", "Vdc", "Vac", "Vrms");
+    public static readonly Unit Ampere = new("A", "ampere", UnitScale.Prefixed, "a", "amp", "amps", "ampere", "amperes");
+    public static readonly Unit Ohm = new("Ω", "ohm", UnitScale.Prefixed, "ohm", "ohm", "ohms", "\u2126", "R");
+    public static readonly Unit Farad = new("F", "farad", UnitScale.Prefixed, "farad", "farad", "farads");
+    public static readonly Unit Henry = new("H", "henry", UnitScale.Prefixed, "henry", "henry", "henries");
+    public static readonly Unit Hertz = new("Hz", "hertz", UnitScale.Prefixed, "hz", "hertz", "c/s");
+    public static readonly Unit Watt = new("W", "watt", UnitScale.Prefixed, "w", "watt", "watts");
+    public static readonly Unit VoltAmpere = new("VA", "volt-ampere", UnitScale.Prefixed, "va", "va");
+    public static readonly Unit Second = new("s", "second", UnitScale.Prefixed, "s", "sec", "second", "seconds");
+    public static readonly Unit Hour = new("h", "hour", UnitScale.Prefixed, "h", "hr", "hrs", "hour", "hours");
+    public static readonly Unit Celsius = new("°C", "degree Celsius", UnitScale.Plain, "degc", "C", "degC", "deg C", "\u2103", "° C");
+    public static readonly Unit Kelvin = new("K", "kelvin", UnitScale.Plain, "k", "kelvin");
+    public static readonly Unit KelvinPerWatt = new("K/W", "kelvin per watt", UnitScale.Plain, "k_per_w", "K/W", "°C/W", "C/W");
+    public static readonly Unit PerKelvin = new("1/K", "per kelvin", UnitScale.Prefixed, "per_k", "/K", "K^-1");
+    public static readonly Unit VoltPerKelvin = new("V/K", "volt per kelvin", UnitScale.Prefixed, "v_per_k", "V/K");
+    public static readonly Unit AmpereSquaredSecond = new("A²s", "ampere squared second", UnitScale.Prefixed, "a2s", "A2s", "A^2s");
+    public static readonly Unit Millimetre = new("mm", "millimetre", UnitScale.Plain, "mm", "mm");
+    public static readonly Unit Percent = new("%", "per cent", UnitScale.Percent, "frac", "percent", "per cent", "pct");
+    public static readonly Unit One = new("", "number", UnitScale.Plain, "n");
+}
