@@ -1,0 +1,63 @@
+using System.Collections.Immutable;
+using Selector.Engine.Quantities;
+
+namespace Selector.Engine.Circuits;
+
+/// <summary>Which way a rating bounds a stress.</summary>
+public enum Side
+{
+    /// <summary>The stress may not exceed what is allowed.</summary>
+    Ceiling,
+
+    /// <summary>The computed value must reach what is required.</summary>
+    Floor,
+
+    /// <summary>A temperature that may not exceed what is allowed; its margin is measured from the ambient.</summary>
+    Temperature,
+}
+
+/// <summary>What a stress is held against.</summary>
+public abstract record Bound
+{
+    private Bound()
+    {
+    }
+
+    /// <summary>A rating of the part in the stress's own position, derated by the policy's clause for the stress's kind.</summary>
+    public sealed record Rating(string Key) : Bound;
+
+    /// <summary>A limit of the part that is no matter of derating, such as a greatest duty: held as it stands.</summary>
+    public sealed record Limit(string Key) : Bound;
+
+    /// <summary>A figure of the requirement, such as the ripple allowed at the output.</summary>
+    public sealed record Required(double Value, string Field) : Bound;
+}
+
+/// <summary>A computed quantity of one position that a rating, a limit or the requirement bounds.</summary>
+/// <param name="Position">The position that carries it.</param>
+/// <param name="Kind">Trade term that the policies know, lower case with hyphens: "ripple-current".</param>
+/// <param name="Name">As printed on ledger and paper.</param>
+/// <param name="Unit">Unit of stress and bound.</param>
+/// <param name="Side">Ceiling, floor or temperature.</param>
+/// <param name="Bound">What it is held against.</param>
+/// <param name="Equation">The law, in symbols; printed under "why".</param>
+public sealed record StressSpec(string Position, string Kind, string Name, Unit Unit, Side Side, Bound Bound, string Equation)
+{
+    /// <summary>Directions in the inputs of the stage; an input that is not listed is taken as unproven.</summary>
+    public ImmutableArray<Dependence> On { get; init; } = [];
+
+    /// <summary>Ratings without which the stress is only partly computed: shown, but never passed.</summary>
+    public ImmutableArray<Need> Needs { get; init; } = [];
+
+    /// <summary>The temperature at which the rating is read, if it falls with temperature: the ambient unless a link is named.</summary>
+    public string? TemperatureLink { get; init; }
+
+    /// <summary>Unique in a supply.</summary>
+    public string Id => $"{Position}.{Kind}";
+}
+
+/// <summary>A rating that a stress needs to be whole.</summary>
+/// <param name="Position">Whose.</param>
+/// <param name="Key">Which.</param>
+/// <param name="Without">What the value leaves out while it is missing, for example "conduction only".</param>
+public sealed record Need(string Position, string Key, string Without);

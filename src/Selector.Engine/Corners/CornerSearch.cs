@@ -1,0 +1,198 @@
+using Selector.Engine.Circuits;
+using Selector.Engine.Supplies;
+
+namespace Selector.Engine.Corners;
+
+/// <summary>
+/// Finds the worst condition of every stress. Axes with a proven direction stand at their end; the others are searched, axis by
+/// axis, at both ends and inside, until no axis makes it worse.
+/// </summary>
+public sealed class CornerSearch
+{
+    private const int MostRounds = 4;
+    private const double GoldenShare = 0.3819660112501051;
+    private const double Worth = 1e-7;
+
+    private readonly SupplyModel _model;
+    private readonly ConditionPool _pool;
+
+    public CornerSearch(SupplyModel model, ConditionPool pool)
+    {
+        _model = model;
+        _pool = pool;
+    }
+
+    /// <summary>The worst condition per stress; null where no condition could be solved.</summary>
+    /// <param name="severities">One per stress of the model.</param>
+    /// <param name="failed">Per stress, a condition at its corner that has no solution; null when there is none.</param>
+    public Condition?[] Worst(IReadOnlyList<Severity> severities, out Condition?[] failed)
+    {
+        var stresses = _model.Stresses.Length;
+        failed = new Condition?[stresses];
+        for (var s = 0; s < stresses; s++)
+        {
+            foreach (var searchedHigh in (ReadOnlySpan<bool>)[false, true])
+            {
+                var start = _pool.At(Vertex(s, severities[s], searchedHigh));
+                if (!start.Solved)
+                {
+                    failed[s] = start;
+                }
+            }
+        }
+
+        var worst = new Condition?[stresses];
+        for (var s = 0; s < stresses; s++)
+        {
+            worst[s] = Climb(s, severities[s]);
+        }
+
+        // What one stress's climb uncovered may be worse for another than its own climb's end.
+        for (var s = 0; s < stresses; s++)
+        {
+            worst[s] = WorstOfPool(severities[s]);
+        }
+
+        return worst;
+    }
+
+    /// <summary>Direction in which severity grows with an axis: the stress's own, joined with that of what is allowed.</summary>
+    public Push Toward(int stress, int axis, Severity severity)
+    {
+        var push = _model.Directions.OfStress(stress, axis);
+        if (_model.Stresses[stress].Spec.Side == Side.Floor)
+        {
+            push = Directions.Then(push, Push.Falls);
+        }
+
+        return axis == _model.AmbientAxis && severity.FallsWithTemperature
+            ? Directions.Join(push, Push.Rises)
+            : push;
+    }
+
+    private double[] Vertex(int stress, Severity severity, bool searchedHigh)
+    {
+        var axes = new double[_model.Axes.Length];
+        for (var a = 0; a < axes.Length; a++)
+        {
+            var axis = _model.Axes[a];
+            axes[a] = Toward(stress, a, severity) switch
+            {
+                Push.Rises => axis.Range.High,
+                Push.Falls => axis.Range.Low,
+                Push.Unproven => searchedHigh ? axis.Range.High : axis.Range.Low,
+                _ => axis.Nominal,
+            };
+        }
+
+        return axes;
+    }
+
+    private Condition? Climb(int stress, Severity severity)
+    {
+        if (WorstOfPool(severity) is not { } best)
+        {
+            return null;
+        }
+
+        for (var round = 0; round < MostRounds; round++)
+        {
+            var before = severity.Of(best);
+            for (var a = 0; a < _model.Axes.Length; a++)
+            {
+                best = Toward(stress, a, severity) switch
+                {
+                    Push.Rises => Worse(best, Moved(best, a, _model.Axes[a].Range.High), severity),
+                    Push.Falls => Worse(best, Moved(best, a, _model.Axes[a].Range.Low), severity),
+                    Push.Unproven => Along(best, a, severity, round),
+                    _ => best,
+                };
+            }
+
+            if (!(severity.Of(best) > before + Worth * Math.Abs(before)))
+            {
+                break;
+            }
+        }
+
+        return best;
+    }
+
+    /// <summary>The worst point of one searched axis through a condition.</summary>
+    private Condition Along(Condition through, int a, Severity severity, int round)
+    {
+        var axis = _model.Axes[a];
+        if (axis.IsFixed)
+        {
+            return through;
+        }
+
+        var best = Worse(through, Moved(through, a, axis.Range.Low), severity);
+        best = Worse(best, Moved(through, a, axis.Range.High), severity);
+        if (axis.EndsOnly || round > 1)
+        {
+            return best;
+        }
+
+        for (var probe = 1; probe <= axis.Probes; probe++)
+        {
+            best = Worse(best, Moved(through, a, axis.Range.At(probe / (axis.Probes + 1.0))), severity);
+        }
+
+        return best.Axes[a] > axis.Range.Low && best.Axes[a] < axis.Range.High ? Inside(best, a, severity) : best;
+    }
+
+    /// <summary>A maximum between two ends, closed in on by the golden section.</summary>
+    private Condition Inside(Condition through, int a, Severity severity)
+    {
+        var axis = _model.Axes[a];
+        var step = axis.Range.Width / (axis.Probes + 1.0);
+        var (low, high) = (Math.Max(axis.Range.Low, through.Axes[a] - step), Math.Min(axis.Range.High, through.Axes[a] + step));
+        var best = through;
+        for (var i = 0; i < 16 && high - low > 1e-4 * axis.Range.Width; i++)
+        {
+            var left = Moved(through, a, low + GoldenShare * (high - low));
+            var right = Moved(through, a, high - GoldenShare * (high - low));
+            best = Worse(Worse(best, left, severity), right, severity);
+            if (left.Solved && (!right.Solved || severity.Of(left) > severity.Of(right)))
+            {
+                high = right.Axes[a];
+            }
+            else
+            {
+                low = left.Axes[a];
+            }
+        }
+
+        return best;
+    }
+
+    private Condition Moved(Condition from, int axis, double value)
+    {
+        if (from.Axes[axis] == value)
+        {
+            return from;
+        }
+
+        var axes = (double[])from.Axes.Clone();
+        axes[axis] = value;
+        return _pool.At(axes);
+    }
+
+    private static Condition Worse(Condition best, Condition other, Severity severity) =>
+        other.Solved && severity.Of(other) > severity.Of(best) ? other : best;
+
+    private Condition? WorstOfPool(Severity severity)
+    {
+        Condition? worst = null;
+        foreach (var c in _pool.All)
+        {
+            if (c.Solved && (worst is null || severity.Of(c) > severity.Of(worst)))
+            {
+                worst = c;
+            }
+        }
+
+        return worst;
+    }
+}

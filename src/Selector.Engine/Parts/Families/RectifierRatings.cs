@@ -1,0 +1,34 @@
+using Selector.Engine.Quantities;
+
+namespace Selector.Engine.Parts.Families;
+
+/// <summary>Ratings that single diodes and bridges share.</summary>
+public static class RectifierRatings
+{
+    public const string Reverse = "reverse_voltage";
+    public const string Average = "average_current";
+    public const string Knee = "current_knee";
+    public const string JunctionMax = "junction_max";
+    public const string Peak = "repetitive_peak";
+    public const string Surge = "surge_current";
+    public const string MeltingIntegral = "surge_integral";
+    public const string Threshold = "threshold";
+    public const string Slope = "slope_resistance";
+    public const string ThresholdDrift = "threshold_drift";
+    public const string Cooling = "junction_to_air";
+
+    internal static RatingSpec[] All { get; } =
+    [
+        new(Reverse, "reverse voltage", Units.Volt, Range.Volts, "Repetitive peak reverse voltage of one diode.") { Required = true, InDescription = true },
+        new(Average, "average current", Units.Ampere, Range.Amperes, "Average forward current, full up to the temperature beside it.") { Required = true, InDescription = true, Fall = new(Knee, JunctionMax) },
+        new(Knee, "average current full to", Units.Celsius, Range.Degrees, "Ambient temperature up to which the average current is full; above it falls to nothing at the greatest junction temperature."),
+        new(JunctionMax, "junction limit", Units.Celsius, new(50, 250), "Greatest junction temperature."),
+        new(Peak, "repetitive peak current", Units.Ampere, Range.Amperes, "Peak current that may recur every cycle."),
+        new(Surge, "surge current", Units.Ampere, Range.Amperes, "One half sine of 10 ms or 8.3 ms, not recurring."),
+        new(MeltingIntegral, "surge integral", Units.AmpereSquaredSecond, new(1e-6, 1e6), "I²t for pulses under 10 ms."),
+        new(Threshold, "threshold voltage", Units.Volt, Range.Drop, "Where the straight line through the forward curve meets zero current, at 25 °C."),
+        new(Slope, "slope resistance", Units.Ohm, new(0, 100), "Slope of that line, of one diode."),
+        new(ThresholdDrift, "threshold drift", Units.VoltPerKelvin, new(-0.01, 0.01), "Change of the threshold with junction temperature; blank counts as none."),
+        new(Cooling, "junction to air", Units.KelvinPerWatt, Range.Cooling, "Thermal resistance of the whole part in still open air, as mounted."),
+    ];
+}

@@ -1,0 +1,54 @@
+namespace Selector.Engine.Supplies;
+
+/// <summary>Names that several stages share: they are the vocabulary between them.</summary>
+public static class CommonFields
+{
+    public const string Source = "source";
+    public const string OutputVoltage = "output.voltage";
+    public const string OutputRipple = "output.ripple";
+    public const string LoadLeast = "load.least";
+    public const string LoadFull = "load.full";
+    public const string AmbientLow = "ambient.low";
+    public const string AmbientHigh = "ambient.high";
+    public const string Units = "build.units";
+    public const string Spares = "build.spares";
+    public const string LeastMargin = "margin.least";
+
+    public const string AmbientAxis = "ambient";
+    public const string LoadAxis = "load";
+    public const string ShortAxis = "short";
+}
+
+/// <summary>Links between stages.</summary>
+public static class LinkNames
+{
+    /// <summary>Mean of the bus, V.</summary>
+    public const string BusMean = "bus.mean";
+
+    /// <summary>Greatest instantaneous bus voltage, V.</summary>
+    public const string BusMax = "bus.max";
+
+    /// <summary>Least instantaneous bus voltage, V.</summary>
+    public const string BusMin = "bus.min";
+
+    /// <summary>Power that the regulator takes from the bus, W.</summary>
+    public const string RegulatorPower = "regulator.input-power";
+
+    /// <summary>Alternating part of the regulator's input current, A rms.</summary>
+    public const string RegulatorRipple = "regulator.input-ripple";
+
+    /// <summary>Its frequency, Hz.</summary>
+    public const string RegulatorFrequency = "regulator.frequency";
+
+    /// <summary>Mean current out of the regulator, A; in a short its short-circuit current.</summary>
+    public const string OutputCurrent = "output.current";
+
+    /// <summary>Resistance between regulator and output terminals, ohm.</summary>
+    public const string SeriesResistance = "series.resistance";
+
+    /// <summary>Loss in one part of a position, W.</summary>
+    public static string Loss(string position) => $"loss.{position}";
+
+    /// <summary>Junction or winding temperature of a position, °C.</summary>
+    public static string Temperature(string position) => $"temperature.{position}";
+}
