@@ -152,7 +152,7 @@ internal sealed class RowMaker(
 
     /// <summary>What the stage had to leave out of the value for want of data.</summary>
     private string Partial() => string.Join(", ", Spec.Needs
-        .Where(n => fittings.TryGetValue(n.Position, out var f) && !f.Part.Has(n.Key))
+        .Where(n => fittings.TryGetValue(n.Position, out var f) && n.IsMissing(f.Part))
         .Select(n => $"needs {model.Registry.Family(model.Positions[model.PositionOrdinal(n.Position)].Family).Rating(n.Key).Name} of {n.Position} ({n.Without})"));
 
     private ImmutableArray<AxisFinding> Findings()
