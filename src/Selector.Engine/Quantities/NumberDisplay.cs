@@ -4,7 +4,7 @@ namespace Selector.Engine.Quantities;
 /// The signs with which numbers are shown. It is the reader's choice and never the host's culture.
 /// </summary>
 /// <remarks>
-/// Groups of three are set apart by a narrow space in every display and not by a comma or a point (ISO 80000-1, 7.3.1):
+/// Groups of three are set apart by a narrow space in every display and not by a comma or a point (ISO 80000-1, from memory):
 /// a printed number can then be typed or pasted back without a doubt about which sign is the decimal one.
 /// </remarks>
 public sealed record NumberDisplay

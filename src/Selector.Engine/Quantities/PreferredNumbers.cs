@@ -2,7 +2,7 @@ using System.Collections.Immutable;
 
 namespace Selector.Engine.Quantities;
 
-/// <summary>The preferred numbers of IEC 60063.</summary>
+/// <summary>The preferred numbers of IEC 60063, as printed in public articles.</summary>
 /// <remarks>
 /// E24 is a table with a history: eight of its values are not the rounded powers. E12, E6 and E3 each take every second value of the
 /// series above. E48, E96 and E192 are round(10^(i/n), 2 decimals) for i = 0 to n - 1, with one exception: E192 has 9.20 at

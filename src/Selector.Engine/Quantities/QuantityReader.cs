@@ -1,4 +1,3 @@
-using System.Globalization;
 using System.Text;
 
 namespace Selector.Engine.Quantities;
@@ -49,7 +48,7 @@ public static class QuantityReader
             body = body[1..].TrimStart();
         }
 
-        if (body.Length > 1 && !char.IsAsciiDigit(body[0]) && char.IsAsciiDigit(body[1]) && body[0] is not ('.' or ','))
+        if (IsLetterBeforeDigit(body))
         {
             return ReadCode("", body, negative, unit);
         }
@@ -66,14 +65,14 @@ public static class QuantityReader
         }
 
         ReadOnlySpan<char> tail = body[numeral.Length..];
-        if (numeral.IsWhole && tail.Length > 1 && !char.IsWhiteSpace(tail[0]) && char.IsAsciiDigit(tail[1]))
+        if (numeral.IsWhole && IsLetterBeforeDigit(tail))
         {
             return ReadCode(body[..numeral.Length], tail, negative, unit);
         }
 
         string packed = Packed(tail);
         UnitText typed = UnitText.Resolve(packed, unit);
-        return typed.Fault is null ? Compose(negative, numeral.Mantissa, numeral.Exponent + typed.Exponent, unit)
+        return typed.Fault is null ? DecimalText.ToReading(negative, numeral.Mantissa, numeral.Exponent + typed.Exponent, unit)
             : QuantityReading.Refused(char.IsAsciiDigit(packed[0]) ? QuantityFaults.SeveralNumbers : typed.Fault);
     }
 
@@ -99,27 +98,7 @@ public static class QuantityReader
             return QuantityReading.Refused(typed.Fault ?? QuantityFaults.Unknown(tail, unit));
         }
 
-        return Compose(negative, $"{whole}.{rest[1..end]}", letter.Exponent, unit);
-    }
-
-    /// <summary>All scaling is done on the decimal text, so that 4.7 µF is the double nearest to 4.7e-6 and not a product near it.</summary>
-    private static QuantityReading Compose(bool negative, string mantissa, int exponent, Unit unit)
-    {
-        int power = unit.Scale == UnitScale.Percent ? exponent - 2 : exponent;
-        string plain = string.Create(CultureInfo.InvariantCulture, $"0{mantissa}0E{power}");
-        double size = double.TryParse(plain, NumberStyles.Float, CultureInfo.InvariantCulture, out double parsed) ? parsed : double.NaN;
-        if (!double.IsFinite(size))
-        {
-            return QuantityReading.Refused(QuantityFaults.TooLarge);
-        }
-
-        if (size == 0)
-        {
-            // Also turns minus nothing into nothing, so that no "-0" is ever shown or stored.
-            return mantissa.AsSpan().IndexOfAnyInRange('1', '9') >= 0 ? QuantityReading.Refused(QuantityFaults.TooSmall) : default;
-        }
-
-        return new QuantityReading(negative ? -size : size, null);
+        return DecimalText.ToReading(negative, $"{whole}.{rest[1..end]}", letter.Exponent, unit);
     }
 
     private static string Packed(ReadOnlySpan<char> text)
@@ -139,5 +118,8 @@ public static class QuantityReader
     private static bool IsNotFinite(ReadOnlySpan<char> body) =>
         body.StartsWith("nan", StringComparison.OrdinalIgnoreCase)
         || body.StartsWith("inf", StringComparison.OrdinalIgnoreCase)
-        || body[0] == '∞';
+        || body.StartsWith("∞", StringComparison.Ordinal);
+
+    private static bool IsLetterBeforeDigit(ReadOnlySpan<char> text) =>
+        text.Length > 1 && char.IsLetter(text[0]) && char.IsAsciiDigit(text[1]);
 }

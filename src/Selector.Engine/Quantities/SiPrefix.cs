@@ -2,7 +2,7 @@ using System.Collections.Immutable;
 
 namespace Selector.Engine.Quantities;
 
-/// <summary>A decimal prefix, femto to tera in steps of a thousand (BIPM, SI brochure, table of prefixes).</summary>
+/// <summary>A decimal prefix, femto to tera in steps of a thousand (BIPM SI brochure, from memory).</summary>
 /// <param name="Symbol">The sign as printed; empty for none.</param>
 /// <param name="Exponent">The power of ten, -15 to 12.</param>
 internal readonly record struct SiPrefix(string Symbol, int Exponent)
