@@ -26,6 +26,9 @@ public sealed class ConditionPool
 
     public int Count => _solved.Count;
 
+    /// <summary>A condition that was solved already; null when it was not.</summary>
+    public Condition? Known(double[] axes) => _solved.GetValueOrDefault(axes);
+
     /// <summary>Solves at these axes, or recalls it.</summary>
     /// <exception cref="OperationCanceledException">The caller no longer wants the answer.</exception>
     public Condition At(double[] axes)

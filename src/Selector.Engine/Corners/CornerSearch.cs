@@ -13,6 +13,12 @@ public sealed class CornerSearch
     private const double GoldenShare = 0.3819660112501051;
     private const double Worth = 1e-7;
 
+    /// <summary>Relative difference below which two corners are equally bad.</summary>
+    private const double Tie = 1e-7;
+
+    /// <summary>Relative change below which an axis is not mentioned in words.</summary>
+    private const double Felt = 1e-3;
+
     private readonly SupplyModel _model;
     private readonly ConditionPool _pool;
 
@@ -47,10 +53,14 @@ public sealed class CornerSearch
             worst[s] = Climb(s, severities[s]);
         }
 
-        // What one stress's climb uncovered may be worse for another than its own climb's end.
+        // What one stress's climb uncovered may be worse for another than its own climb's end; a tie keeps the own corner.
         for (var s = 0; s < stresses; s++)
         {
-            worst[s] = WorstOfPool(severities[s]);
+            if (worst[s] is { } own && WorstOfPool(severities[s]) is { } found
+                && severities[s].Of(found) > severities[s].Of(own) + Tie * Math.Abs(severities[s].Of(own)))
+            {
+                worst[s] = found;
+            }
         }
 
         return worst;
@@ -68,6 +78,24 @@ public sealed class CornerSearch
         return axis == _model.AmbientAxis && severity.FallsWithTemperature
             ? Directions.Join(push, Push.Rises)
             : push;
+    }
+
+    /// <summary>
+    /// Whether an axis is worth a word at a corner: it bears on the stress, and nothing that was solved shows that moving it to
+    /// its other end leaves the stress as it is.
+    /// </summary>
+    public bool Speaks(int stress, int axis, Severity severity, Condition at)
+    {
+        var spec = _model.Axes[axis];
+        if (spec.IsFixed || Toward(stress, axis, severity) == Push.None)
+        {
+            return false;
+        }
+
+        var other = (double[])at.Axes.Clone();
+        other[axis] = at.Axes[axis] > spec.Range.Low ? spec.Range.Low : spec.Range.High;
+        return _pool.Known(other) is not { Solved: true } moved
+            || Math.Abs(severity.Of(moved) - severity.Of(at)) > Felt * Math.Abs(severity.Of(at));
     }
 
     private double[] Vertex(int stress, Severity severity, bool searchedHigh)
@@ -90,7 +118,7 @@ public sealed class CornerSearch
 
     private Condition? Climb(int stress, Severity severity)
     {
-        if (WorstOfPool(severity) is not { } best)
+        if (Start(stress, severity) is not { } best)
         {
             return null;
         }
@@ -116,6 +144,15 @@ public sealed class CornerSearch
         }
 
         return best;
+    }
+
+    /// <summary>The worse of the stress's own two vertices, or whatever in the pool is worse than both.</summary>
+    private Condition? Start(int stress, Severity severity)
+    {
+        var (low, high) = (_pool.At(Vertex(stress, severity, false)), _pool.At(Vertex(stress, severity, true)));
+        var own = !low.Solved ? high : !high.Solved || severity.Of(low) >= severity.Of(high) ? low : high;
+        var found = WorstOfPool(severity);
+        return own.Solved && (found is null || severity.Of(found) <= severity.Of(own) + Tie * Math.Abs(severity.Of(own))) ? own : found;
     }
 
     /// <summary>The worst point of one searched axis through a condition.</summary>

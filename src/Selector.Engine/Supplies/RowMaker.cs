@@ -170,10 +170,15 @@ internal sealed class RowMaker(
             ?? "by way of " + string.Join(", ", Spec.On.Where(d => d.Input.Kind == InputKind.Link && d.Push is Push.Rises or Push.Falls).Select(d => d.Proof).Distinct(StringComparer.Ordinal));
     }
 
-    private string Words(Condition at) => string.Join(", ", Enumerable.Range(0, model.Axes.Length)
-        .Where(a => !model.Axes[a].IsFixed && search.Toward(stress, a, severity) != Push.None)
-        .Select(a => model.Axes[a].Words(at.Axes[a]))
-        .Where(w => w.Length > 0));
+    private string Words(Condition at)
+    {
+        // A shorted output has no load to speak of.
+        var shorted = Enumerable.Range(0, model.Axes.Length).Any(a => model.Axes[a].Id == CommonFields.ShortAxis && at.Axes[a] > 0.5);
+        return string.Join(", ", Enumerable.Range(0, model.Axes.Length)
+            .Where(a => search.Speaks(stress, a, severity, at) && !(shorted && model.Axes[a].Id == CommonFields.LoadAxis))
+            .Select(a => model.Axes[a].Words(at.Axes[a]))
+            .Where(w => w.Length > 0));
+    }
 
     private string AllAxes(Condition at) => string.Join(", ", Enumerable.Range(0, model.Axes.Length)
         .Where(a => !model.Axes[a].IsFixed)
