@@ -12,6 +12,13 @@ public sealed class CornerSearch
     private const int MostRounds = 4;
     private const double GoldenShare = 0.3819660112501051;
     private const double Worth = 1e-7;
+    private const int MostSections = 16;
+
+    /// <summary>A flat top is found to its square: a thousandth of the range leaves less than a millionth of the height.</summary>
+    private const double SectionEnd = 1e-3;
+
+    /// <summary>Step inwards, as a share of the range, that tells whether an end is a maximum.</summary>
+    private const double EndStep = 1e-3;
 
     /// <summary>Relative difference below which two corners are equally bad.</summary>
     private const double Tie = 1e-7;
@@ -176,7 +183,20 @@ public sealed class CornerSearch
             best = Worse(best, Moved(through, a, axis.Range.At(probe / (axis.Probes + 1.0))), severity);
         }
 
-        return best.Axes[a] > axis.Range.Low && best.Axes[a] < axis.Range.High ? Inside(best, a, severity) : best;
+        return axis.Probes > 0 && RisesInwards(best, a, severity) ? Inside(best, a, severity) : best;
+    }
+
+    /// <summary>Whether the worst point so far is inside already, or stands at an end from which severity grows inwards.</summary>
+    private bool RisesInwards(Condition best, int a, Severity severity)
+    {
+        var range = _model.Axes[a].Range;
+        if (best.Axes[a] > range.Low && best.Axes[a] < range.High)
+        {
+            return true;
+        }
+
+        var step = range.Width * (best.Axes[a] <= range.Low ? EndStep : -EndStep);
+        return Worse(best, Moved(best, a, best.Axes[a] + step), severity) != best;
     }
 
     /// <summary>A maximum between two ends, closed in on by the golden section.</summary>
@@ -186,7 +206,7 @@ public sealed class CornerSearch
         var step = axis.Range.Width / (axis.Probes + 1.0);
         var (low, high) = (Math.Max(axis.Range.Low, through.Axes[a] - step), Math.Min(axis.Range.High, through.Axes[a] + step));
         var best = through;
-        for (var i = 0; i < 16 && high - low > 1e-4 * axis.Range.Width; i++)
+        for (var i = 0; i < MostSections && high - low > SectionEnd * axis.Range.Width; i++)
         {
             var left = Moved(through, a, low + GoldenShare * (high - low));
             var right = Moved(through, a, high - GoldenShare * (high - low));

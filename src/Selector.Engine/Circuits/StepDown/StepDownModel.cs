@@ -28,13 +28,13 @@ internal sealed class StepDownModel : StageModel
         _in = new StepDownInputs(Read);
         _power = Write(new(LinkNames.RegulatorPower, Units.Watt, _output * _full,
             [.. Rises("more load, more power", Load), .. OutputCapacitorHardly, .. BusLoop, .. Heat]));
-        _ripple = Write(new(LinkNames.RegulatorRipple, Units.Ampere, _full / 2, [.. OutputCapacitorHardly]));
+        _ripple = Write(new(LinkNames.RegulatorRipple, Units.Ampere, _full / 2));
         _frequency = Write(new(LinkNames.RegulatorFrequency, Units.Hertz, 1e5,
             [new Dependence(InputId.Axis(CommonFields.ShortAxis), Push.Unproven, "a part may lower its frequency when shorted")]) { Others = Push.None });
         _current = Write(new(LinkNames.OutputCurrent, Units.Ampere, _full,
             [.. Rises("it is the load", Load), .. OutputCapacitorHardly]));
-        _switchLoss = Write(new(LinkNames.Loss(U1), Units.Watt, 0.1, [.. Rises("more load, more loss", Load), .. OutputCapacitorHardly]));
-        _diodeLoss = Write(new(LinkNames.Loss(D5), Units.Watt, 0.1, [.. Rises("more load, more loss", Load), .. OutputCapacitorHardly]));
+        _switchLoss = Write(new(LinkNames.Loss(U1), Units.Watt, 0.1, [.. Rises("more load, more loss", Load)]));
+        _diodeLoss = Write(new(LinkNames.Loss(D5), Units.Watt, 0.1, [.. Rises("more load, more loss", Load)]));
         _coilTemperature = Write(new(LinkNames.Temperature(L1), Units.Celsius, 40, [.. Rises("more load, more current", Load), .. OutputCapacitorHardly]));
         _stress = new StepDownStresses(Stress, r);
         Positions = List(r);

@@ -33,9 +33,9 @@ internal sealed class StepDownStresses
         _lockOut = stress(new(U1, "input-least", "input at the valley, at least", Units.Volt, Side.Floor, new Bound.Limit(RegulatorFamily.InputMin), "V = least bus voltage")
             { On = [.. Rises("it is the valley of the bus", BusMin)], Others = Push.None });
         _duty = stress(new(U1, "duty", "duty at the valley", Units.Percent, Side.Ceiling, new Bound.Limit(RegulatorFamily.DutyMax), "D at which the mean output is reached")
-            { On = [.. Falls("less input, more duty", BusMin), .. Rises("drops grow with load", Load), .. Falls("the limit shortens the duty", Short), .. NotAt(BusMax, BusMean), .. StepDownModel.OutputCapacitorHardly] });
+            { On = [.. Falls("less input, more duty", BusMin), .. Rises("drops grow with load", Load), .. Falls("the limit shortens the duty", Short), .. NotAt(BusMax, BusMean)] });
         _onTime = stress(new(U1, "on-time", "on-time at full load, at least", Units.Second, Side.Floor, new Bound.Limit(RegulatorFamily.OnTimeMin), "t = D / f at the top of the bus")
-            { On = [.. Falls("more input, less duty", BusMax), .. None("taken at full load; below it pulses are skipped", Load), .. Rises("when shorted the least on-time is part of the model", Short), .. NotAt(BusMin, BusMean), .. StepDownModel.OutputCapacitorHardly] });
+            { On = [.. Falls("more input, less duty", BusMax), .. None("taken at full load; below it pulses are skipped", Load), .. Rises("when shorted the least on-time is part of the model", Short), .. NotAt(BusMin, BusMean)] });
         _output = stress(new(U1, "output-current", "output current", Units.Ampere, Side.Ceiling, new Bound.Rating(RegulatorFamily.OutputCurrent), "I = load")
             { On = [.. Rises("it is the load", Load)], Others = Push.None });
         _outputLow = stress(new(U1, "output-low", "output, at least", Units.Volt, Side.Floor, new Bound.Limit(RegulatorFamily.OutputMin), "V = output asked") { Others = Push.None });
