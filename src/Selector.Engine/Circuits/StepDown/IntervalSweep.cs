@@ -7,22 +7,8 @@ namespace Selector.Engine.Circuits.StepDown;
 /// </summary>
 internal static class IntervalSweep
 {
-    private const int Points = 8;
-
     // Beyond this many half-radian pieces the circuit rings thousands of times between two switching instants.
     private const int GreatestPieces = 4096;
-
-    private static ReadOnlySpan<double> Nodes =>
-    [
-        0.019855071751231884, 0.10166676129318664, 0.2372337950418355, 0.4082826787521751,
-        0.5917173212478249, 0.7627662049581645, 0.8983332387068134, 0.9801449282487681,
-    ];
-
-    private static ReadOnlySpan<double> Weights =>
-    [
-        0.05061426814518813, 0.11119051722668724, 0.15685332293894363, 0.1813418916891810,
-        0.1813418916891810, 0.15685332293894363, 0.11119051722668724, 0.05061426814518813,
-    ];
 
     /// <summary>
     /// Adds the interval of <paramref name="time"/> seconds from <paramref name="start"/>. False where the circuit rings more
@@ -71,10 +57,10 @@ internal static class IntervalSweep
         }
 
         var width = Math.ScaleB(time, -doublings);
-        var nodes = Nodes;
-        var weights = Weights;
-        Span<ModeValues> values = stackalloc ModeValues[Points];
-        for (var k = 0; k < Points; k++)
+        var nodes = GaussLegendre.Nodes;
+        var weights = GaussLegendre.Weights;
+        Span<ModeValues> values = stackalloc ModeValues[GaussLegendre.Points];
+        for (var k = 0; k < GaussLegendre.Points; k++)
         {
             values[k] = modes.At(width * nodes[k]);
         }
@@ -83,7 +69,7 @@ internal static class IntervalSweep
         var from = 0.0;
         for (var panel = 0; ; panel++)
         {
-            for (var k = 0; k < Points; k++)
+            for (var k = 0; k < GaussLegendre.Points; k++)
             {
                 ref readonly var m = ref values[k];
                 var (i, v) = (coil.At(m), terminal.At(m));
@@ -101,7 +87,7 @@ internal static class IntervalSweep
             // Every later panel starts and ends at twice the times of the one before it.
             var shift = panel == 0 ? modes.At(from) : default;
             width *= panel == 0 ? 1 : 2;
-            for (var k = 0; k < Points; k++)
+            for (var k = 0; k < GaussLegendre.Points; k++)
             {
                 values[k] = values[k].Then(panel == 0 ? shift : values[k], modes.Square);
             }
