@@ -17,7 +17,8 @@ internal readonly struct ChargingPath
         Esr = c.Esr;
         Kind = c.LoadKind;
         Load = c.Load;
-        Cycle = (c.Arrangement == RectifierArrangement.HalfWave ? 1 : 0.5) / c.Frequency;
+        PulsesPerPeriod = c.Arrangement == RectifierArrangement.HalfWave ? 1 : 2;
+        Cycle = 1 / (PulsesPerPeriod * c.Frequency);
         Collapsed = 0.3 * Peak;
     }
 
@@ -38,6 +39,9 @@ internal readonly struct ChargingPath
     public LoadKind Kind { get; }
 
     public double Load { get; }
+
+    /// <summary>Charging pulses in one period of the mains.</summary>
+    public int PulsesPerPeriod { get; }
 
     /// <summary>Time from pulse to pulse, s.</summary>
     public double Cycle { get; }

@@ -130,7 +130,7 @@ internal sealed class MainsModel : ReservoirModel
     }
 
     private static AxisSpec Around(string id, double nominal, double tolerance) =>
-        new(id, new(nominal * (1 - tolerance), nominal * (1 + tolerance)), nominal, v => QuantityWriter.Write(v, Units.Hertz)) { Probes = 0 };
+        new(id, new(nominal * (1 - tolerance), nominal * (1 + tolerance)), nominal, v => QuantityWriter.Write(v, Units.Hertz));
 
     private static string Plain(double value) => value.ToString("0.#", System.Globalization.CultureInfo.InvariantCulture);
 }

@@ -20,7 +20,7 @@ internal static class RectifierFigures
         var pulse = new PulseView(c, path, pieces);
         var figure = c.Arrangement == RectifierArrangement.Bridge ? PulseFigure.BridgeReverse
             : c.Arrangement == RectifierArrangement.CentreTap ? PulseFigure.CentreTapReverse : PulseFigure.Bus;
-        var sums = CycleIntegrals.Of(path, train, pulse, pieces, figure);
+        var sums = CycleIntegrals.Of(path, train, pulse, pieces, figure, detail);
         var s = new RectifierSolution { PulseStart = train.Start, PulseEnd = train.End };
         Means(ref s, c, path, sums);
         Powers(ref s, c, path, sums);
