@@ -8,6 +8,9 @@ internal struct CycleIntegrals
 
     public double Bus, BusSquare, Load, Charge, ChargeSquare, CapacitorSquare, CapacitorCos, CapacitorSin, Source, LoadPower;
 
+    /// <summary>Square of the reverse voltage, mean of all diodes, V²s.</summary>
+    public double ReverseSquare;
+
     /// <summary>Times at which the sampled extremes lie.</summary>
     public double PeakAt, BusMaxAt, BusMinAt, ReverseAt, RestReverse;
     private double _peak, _busMax, _busMin, _reverse;
@@ -67,7 +70,8 @@ internal struct CycleIntegrals
             var t = start + width * (1 + nodes[n]) / 2;
             piece.At(t, out var u, out var j);
             var v = piece.Terminal(u, j);
-            Add(path, t, j, v, weights[n] * width / 2);
+            var sine = Add(path, t, j, v, weights[n] * width / 2);
+            ReverseSquare += weights[n] * width / 2 * path.ReverseSquareInPulse(v, j, path.Peak * sine);
             if (detail == RectifierDetail.All)
             {
                 Sample(t, pulse, reverse, j, v);
@@ -82,6 +86,7 @@ internal struct CycleIntegrals
             var t = start + width * (1 + Nodes[n]) / 2;
             var v = rest.Terminal(t, out _);
             var sine = Add(path, t, 0, v, Weights[n] * width / 2);
+            ReverseSquare += Weights[n] * width / 2 * path.ReverseSquareAtRest(v, path.Peak * sine);
             RestReverse = Math.Max(RestReverse, v - path.Peak * sine);
         }
     }

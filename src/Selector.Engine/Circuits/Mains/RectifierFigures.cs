@@ -69,7 +69,8 @@ internal static class RectifierFigures
         s.PowerFactor = s.SourceApparent > 0 ? s.SourcePower / s.SourceApparent : 0;
         s.LoadPower = sums.LoadPower / path.Cycle;
         s.WindingLoss = windings * c.WindingResistance * s.SecondaryRms * s.SecondaryRms;
-        s.DiodeLoss = c.DiodeThreshold * s.DiodeAverage + c.DiodeSlope * s.DiodeRms * s.DiodeRms;
+        s.DiodeLoss = c.DiodeThreshold * s.DiodeAverage + c.DiodeSlope * s.DiodeRms * s.DiodeRms
+            + c.BlockingConductance * sums.ReverseSquare / path.Cycle;
         s.EsrLoss = c.Esr * s.CapacitorRms * s.CapacitorRms;
     }
 
