@@ -16,7 +16,7 @@ internal static class Head
         var faces = flow.Faces;
         var top = flow.Y;
         var split = form.Left + form.Inner * NameShare;
-        var name = Wrap.Lines(cover.Name.Length == 0 ? "unnamed" : cover.Name, faces.Name, split - form.Left - 2 * Pad, 3);
+        var name = Wrap.Lines(cover.Name, faces.Name, split - form.Left - 2 * Pad, 3);
         var factWidth = (form.Right - split) / cover.Facts.Length;
         var facts = cover.Facts.Select(f => (
             Fact: f,

@@ -28,7 +28,7 @@ internal static class Wrap
     private static void Paragraph(string text, Face face, double width, ImmutableArray<string>.Builder lines)
     {
         var line = "";
-        foreach (var word in text.Split(' ', StringSplitOptions.RemoveEmptyEntries))
+        foreach (var word in Words(text))
         {
             var longer = line.Length == 0 ? word : line + " " + word;
             if (face.Width(longer) <= width)
@@ -52,6 +52,33 @@ internal static class Wrap
         }
 
         lines.Add(line);
+    }
+
+    /// <summary>Words between ordinary spaces; a short unit stays with the number before it however it was typed.</summary>
+    private static IEnumerable<string> Words(string text)
+    {
+        const int LongestUnit = 4;
+        string? held = null;
+        foreach (var word in text.Split(' ', StringSplitOptions.RemoveEmptyEntries))
+        {
+            if (held is not null && char.IsAsciiDigit(held[^1]) && word.Length <= LongestUnit && !char.IsAsciiDigit(word[0]))
+            {
+                held += " " + word;
+                continue;
+            }
+
+            if (held is not null)
+            {
+                yield return held;
+            }
+
+            held = word;
+        }
+
+        if (held is not null)
+        {
+            yield return held;
+        }
     }
 
     /// <summary>How much of a word that is too wide fits, at least one sign and never half a sign.</summary>

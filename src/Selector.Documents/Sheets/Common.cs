@@ -10,7 +10,7 @@ internal static class Common
 {
     public static Cover Cover(PaperInput input) => new(
         string.Create(CultureInfo.InvariantCulture, $"Supply {input.SupplyNumber:0000}"),
-        input.SupplyName,
+        string.IsNullOrWhiteSpace(input.SupplyName) ? "unnamed" : input.SupplyName.Trim(),
         input.Issue,
         [
             new("Issue", input.Issue),

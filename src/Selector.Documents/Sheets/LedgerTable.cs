@@ -13,18 +13,18 @@ internal static class LedgerTable
 {
     private static readonly ImmutableArray<Column> Columns =
     [
-        new("position", "Position", 40),
-        new("part", "Part", 82),
-        new("stress", "Stress", 68),
-        new("worst-corner", "Worst corner", 98),
-        new("value", "Value", 46, Align.Right),
-        new("rating", "Rating", 74, Align.Right, "rating-basis"),
-        new("clause", "Clause", 106, NoteKey: "clause-document"),
-        new("allowed", "Allowed", 48, Align.Right),
-        new("scale", "0 to rating", 62),
-        new("margin", "Margin", 44, Align.Right, "kelvin-left"),
+        new("position", "Position", 39),
+        new("part", "Part", 76),
+        new("stress", "Stress", 66),
+        new("worst-corner", "Worst corner", 94),
+        new("value", "Value", 44, Align.Right),
+        new("rating", "Rating", 70, Align.Right, "rating-basis"),
+        new("clause", "Clause", 128, NoteKey: "clause-document"),
+        new("allowed", "Allowed", 46, Align.Right),
+        new("scale", "0 to rating", 74) { IsDrawn = true },
+        new("margin", "Margin", 42, Align.Right, "kelvin-left"),
         new("margin-without-derating", "Without derating", 46, Align.Right),
-        new("verdict", "Verdict", 78),
+        new("verdict", "Verdict", 76),
     ];
 
     public static Table Of(PaperInput input)
@@ -85,14 +85,18 @@ internal static class LedgerTable
 
     private static string Basis(PaperInput input, LedgerPosition position, LedgerRow row) => row.Spec?.Bound switch
     {
-        Bound.Rating r => $"{RatingName(position, r.Key)}, {(row.Clause?.Basis == RatingBasis.AtTemperature ? "at temperature" : "as printed")}",
-        Bound.Limit l => $"{RatingName(position, l.Key)}, limit",
+        Bound.Rating r => Named(position, r.Key, row) + (row.Clause?.Basis == RatingBasis.AtTemperature ? "at temperature" : "as printed"),
+        Bound.Limit l => Named(position, l.Key, row) + "limit",
         Bound.Required r => $"required: {input.Requirement.Find(r.Field)?.Field.Label ?? r.Field}",
         _ => "",
     };
 
-    private static string RatingName(LedgerPosition position, string key) =>
-        position.Fitting?.Part.Family.Ratings.FirstOrDefault(r => r.Key == key)?.Name ?? key.Replace('_', ' ');
+    /// <summary>Name of the rating with a comma after it, unless the stress has just been called the same.</summary>
+    private static string Named(LedgerPosition position, string key, LedgerRow row)
+    {
+        var name = position.Fitting?.Part.Family.Ratings.FirstOrDefault(r => r.Key == key)?.Name ?? key.Replace('_', ' ');
+        return name == row.Name ? "" : name + ", ";
+    }
 
     private static TextCell Clause(LedgerRow row) => row.Clause is { } clause
         ? new(clause.Operator.Words) { Note = Source(clause) }
