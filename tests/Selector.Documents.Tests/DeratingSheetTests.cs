@@ -16,10 +16,10 @@ public class DeratingSheetTests
         var row = Find("C1", "ripple current, weighted");
 
         Assert.Equal(
-            ["C1", "Arden LE4-472-35", "ripple current, weighted", "mains +10 %, 1.500 A, C new", "1.28\u202fA", "1.45\u202fA", "0.8 of rating", "1.16\u202fA", "", "-10.4\u202f%", "11.7\u202f%", "lacks 10\u202f%"],
+            ["C1", "Arden LE4-472-35", "ripple current, weighted", "mains +10 %, 1.500 A, C new", "1.28\u202fA", "1.45\u202fA", "0.8 of rating; common practice", "1.16\u202fA", "", "-10.4\u202f%", "11.7\u202f%", "lacks 10\u202f%"],
             row.Cells.Select(c => c.Text));
-        Assert.Equal("ripple current, as printed", row.Cells[5].Note);
-        Assert.Equal("general industrial practice; common practice", row.Cells[6].Note);
+        Assert.Equal("ripple current", row.Cells[5].Note);
+        Assert.Equal("general industrial practice", row.Cells[6].Note);
         Assert.Equal(Tone.Lacks, Assert.IsType<VerdictCell>(row.Cells[11]).Tone);
     }
 
@@ -27,8 +27,15 @@ public class DeratingSheetTests
     public void A_temperature_has_its_kelvins() => Assert.Equal("28.8\u202fK", Find("D1-D4", "junction temperature").Cells[9].Note);
 
     [Fact]
-    public void The_clause_names_place_and_certainty() => Assert.Equal(
-        "House rules for rectifiers, clause 4.2; second-hand", Find("D5", "average current").Cells[6].Note);
+    public void The_clause_names_operator_certainty_document_and_place_and_the_rating_its_basis()
+    {
+        var row = Find("D5", "average current");
+
+        Assert.Equal(("0.7 of rating; second-hand", "House rules for rectifiers, clause 4.2"), (row.Cells[6].Text, row.Cells[6].Note));
+        Assert.Equal("at temperature", row.Cells[5].Note);
+        Assert.Equal("as printed", Find("C1", "voltage").Cells[5].Note);
+        Assert.Equal("required: Life", Find("C1", "life").Cells[5].Note);
+    }
 
     [Theory]
     [InlineData("C1", "voltage", Mark.Half, Tone.Close, "holds, under 5\u202f%")]

@@ -53,6 +53,15 @@ public class PdfFormTests
     }
 
     [Fact]
+    public void A_signature_that_is_too_long_stays_in_its_cell()
+    {
+        var runs = ReadBack.Runs(Make("long", PaperSize.A4));
+        var drawn = runs.First(r => r.Page == 1 && r.Top > 100 && r.Text.EndsWith('\u2026') && r.Text.StartsWith("Unterbrechung", StringComparison.Ordinal));
+
+        Assert.True(drawn.Right < runs.First(r => r.Page == 1 && r.Text == "Checked").Left);
+    }
+
+    [Fact]
     public void Sheet_has_the_size_that_was_asked_for()
     {
         using var letter = PdfDocument.Open(Make("whole", PaperSize.Letter));

@@ -58,7 +58,7 @@ internal static class Head
             flow.Graphics.DrawLine(flow.Ink.Hairline, x, top, x, top + SignHeight);
             flow.Draw(who.Label, flow.Faces.Small, flow.Ink.Quiet, x + Pad, top + 3);
             flow.DrawRight("signed, date", flow.Faces.Small, flow.Ink.Quiet, x + width - Pad, top + 3);
-            flow.Draw(who.Value, flow.Faces.Text, flow.Ink.Plain, x + Pad, top + SignHeight - 17);
+            flow.Draw(Wrap.OneLine(who.Value, flow.Faces.Text, width - 2 * Pad), flow.Faces.Text, flow.Ink.Plain, x + Pad, top + SignHeight - 17);
             flow.Graphics.DrawLine(flow.Ink.Rule, x + Pad, top + SignHeight - 6, x + width - Pad, top + SignHeight - 6);
             x += width;
         }
