@@ -73,7 +73,7 @@ internal static class Grid
     {
         private readonly ImmutableArray<string> _label = Wrap.Lines(fact.Label, faces.Small, width);
         private readonly ImmutableArray<string> _value = Wrap.Lines(fact.Value.Length == 0 ? "\u2013" : fact.Value, faces.Text, width - 4);
-        private readonly ImmutableArray<string> _note = Wrap.Lines(fact.Fault.Length > 0 ? fact.Fault : fact.Note, faces.Small, width);
+        private readonly ImmutableArray<string> _note = Wrap.Lines(fact.Fault.Length > 0 ? fact.Fault : fact.Note, fact.Fault.Length > 0 ? faces.SmallStrong : faces.Small, width);
 
         public double Height => _label.Length * faces.Small.Line + ValueHeight + 1 + _note.Length * faces.Small.Line;
 
