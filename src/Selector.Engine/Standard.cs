@@ -1,3 +1,9 @@
+using Selector.Engine.Circuits.CurrentLimit;
+using Selector.Engine.Circuits.Direct;
+using Selector.Engine.Circuits.Mains;
+using Selector.Engine.Circuits.Output;
+using Selector.Engine.Circuits.StepDown;
+using Selector.Engine.Circuits.Thermal;
 using Selector.Engine.Parts.Families;
 using Selector.Engine.Supplies;
 
@@ -7,7 +13,14 @@ namespace Selector.Engine;
 public static class Standard
 {
     public static Registry Registry { get; } = new(
-        [],
+        [
+            new OutputStage(),
+            new MainsStage(),
+            new DirectStage(),
+            new StepDownStage(),
+            new SenseStage(),
+            new ThermalStage(),
+        ],
         [
             TransformerFamily.Spec,
             BridgeFamily.Spec,

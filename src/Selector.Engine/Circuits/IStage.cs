@@ -31,7 +31,10 @@ public interface IStage
     StageModel Build(RequirementValues requirement, ImmutableArray<StageModel> before);
 }
 
-/// <summary>A stage as one requirement makes it: immutable, shared by threads.</summary>
+/// <summary>
+/// A stage as one requirement makes it: immutable once built, shared by threads. A derived class declares its inputs, links and
+/// stresses in its constructor and keeps the places that the declarations return; its solver reads and writes by them.
+/// </summary>
 public abstract class StageModel
 {
     /// <summary>Places to fill, in the order of the signal path.</summary>
@@ -41,13 +44,13 @@ public abstract class StageModel
     public ImmutableArray<AxisSpec> Axes { get; protected init; } = [];
 
     /// <summary>What the solver reads, in this order.</summary>
-    public ImmutableArray<InputSpec> Inputs { get; protected init; } = [];
+    public ImmutableArray<InputSpec> Inputs { get; private set; } = [];
 
     /// <summary>What the solver writes for other stages, in this order.</summary>
-    public ImmutableArray<LinkSpec> Writes { get; protected init; } = [];
+    public ImmutableArray<LinkSpec> Writes { get; private set; } = [];
 
     /// <summary>What the solver writes for the ledger, in this order.</summary>
-    public ImmutableArray<StressSpec> Stresses { get; protected init; } = [];
+    public ImmutableArray<StressSpec> Stresses { get; private set; } = [];
 
     /// <summary>What the stage leaves out.</summary>
     public ImmutableArray<NotAssessed> NotAssessed { get; protected init; } = [];
@@ -64,9 +67,30 @@ public abstract class StageModel
     /// <summary>Solves the stage at one condition. Must write every link and stress, all finite, when it returns Solved.</summary>
     /// <param name="inputs">In the order of <see cref="Inputs"/>; finite.</param>
     /// <param name="links">In the order of <see cref="Writes"/>; on entry the last values, as a start.</param>
-    /// <param name="stresses">In the order of <see cref="Stresses"/>.</param>
+    /// <param name="stresses">In the order of <see cref="Stresses"/>; empty while the loops among stages are being closed.</param>
     /// <param name="budget">Bound on work.</param>
     public abstract SolveStatus Solve(ReadOnlySpan<double> inputs, Span<double> links, Span<double> stresses, in Budget budget);
+
+    /// <summary>Declares an input; returns its place.</summary>
+    protected int Read(InputId id, double? fallback = null)
+    {
+        Inputs = Inputs.Add(new InputSpec(id, fallback));
+        return Inputs.Length - 1;
+    }
+
+    /// <summary>Declares a link; returns its place.</summary>
+    protected int Write(LinkSpec link)
+    {
+        Writes = Writes.Add(link);
+        return Writes.Length - 1;
+    }
+
+    /// <summary>Declares a stress; returns its place.</summary>
+    protected int Stress(StressSpec stress)
+    {
+        Stresses = Stresses.Add(stress);
+        return Stresses.Length - 1;
+    }
 }
 
 /// <summary>A part that heats up.</summary>

@@ -55,9 +55,27 @@ public enum Push : sbyte
 /// <summary>How an output depends on one input, with the proof or the reason.</summary>
 public sealed record Dependence(InputId Input, Push Push, string Proof);
 
+/// <summary>Short ways to state the same direction for several inputs.</summary>
+public static class Dependences
+{
+    public static IEnumerable<Dependence> Rises(string proof, params InputId[] inputs) => inputs.Select(i => new Dependence(i, Push.Rises, proof));
+
+    public static IEnumerable<Dependence> Falls(string proof, params InputId[] inputs) => inputs.Select(i => new Dependence(i, Push.Falls, proof));
+
+    /// <summary>Inputs that do not bear on the output, or only around a loop whose gain is below one and so cannot turn a sign.</summary>
+    public static IEnumerable<Dependence> None(string proof, params InputId[] inputs) => inputs.Select(i => new Dependence(i, Push.None, proof));
+}
+
 /// <summary>A named quantity that a stage writes for others.</summary>
 /// <param name="Name">Unique among the stages of one supply, for example "bus.min".</param>
 /// <param name="Unit">Its unit.</param>
 /// <param name="Start">First guess for the loops among stages.</param>
-/// <param name="On">Directions in the inputs of the stage; an input that is not listed is taken as unproven.</param>
-public sealed record LinkSpec(string Name, Unit Unit, double Start, params Dependence[] On);
+/// <param name="On">Directions in the inputs of the stage.</param>
+public sealed record LinkSpec(string Name, Unit Unit, double Start, params Dependence[] On)
+{
+    /// <summary>Direction in the inputs that are not listed: unproven, or none where the equation does not contain them.</summary>
+    public Push Others { get; init; } = Push.Unproven;
+
+    /// <summary>Not a quantity of the circuit but where the stage's next search begins: no loop waits for it to settle.</summary>
+    public bool IsHint { get; init; }
+}

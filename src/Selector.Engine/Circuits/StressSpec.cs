@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using Selector.Engine.Parts;
 using Selector.Engine.Quantities;
 
 namespace Selector.Engine.Circuits;
@@ -43,8 +44,11 @@ public abstract record Bound
 /// <param name="Equation">The law, in symbols; printed under "why".</param>
 public sealed record StressSpec(string Position, string Kind, string Name, Unit Unit, Side Side, Bound Bound, string Equation)
 {
-    /// <summary>Directions in the inputs of the stage; an input that is not listed is taken as unproven.</summary>
+    /// <summary>Directions in the inputs of the stage.</summary>
     public ImmutableArray<Dependence> On { get; init; } = [];
+
+    /// <summary>Direction in the inputs that are not listed: unproven, or none where the equation does not contain them.</summary>
+    public Push Others { get; init; } = Push.Unproven;
 
     /// <summary>Ratings without which the stress is only partly computed: shown, but never passed.</summary>
     public ImmutableArray<Need> Needs { get; init; } = [];
@@ -60,4 +64,10 @@ public sealed record StressSpec(string Position, string Kind, string Name, Unit 
 /// <param name="Position">Whose.</param>
 /// <param name="Key">Which.</param>
 /// <param name="Without">What the value leaves out while it is missing, for example "conduction only".</param>
-public sealed record Need(string Position, string Key, string Without);
+public sealed record Need(string Position, string Key, string Without)
+{
+    /// <summary>When the data do not serve; by default when the rating is not given.</summary>
+    public Func<Part, bool>? Lacking { get; init; }
+
+    public bool IsMissing(Part part) => Lacking?.Invoke(part) ?? !part.Has(Key);
+}

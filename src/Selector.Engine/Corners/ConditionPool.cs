@@ -26,6 +26,9 @@ public sealed class ConditionPool
 
     public int Count => _solved.Count;
 
+    /// <summary>A condition that was solved already; null when it was not.</summary>
+    public Condition? Known(double[] axes) => _solved.GetValueOrDefault(axes);
+
     /// <summary>Solves at these axes, or recalls it.</summary>
     /// <exception cref="OperationCanceledException">The caller no longer wants the answer.</exception>
     public Condition At(double[] axes)
@@ -50,13 +53,6 @@ public sealed class ConditionPool
         if (status == SolveStatus.Cancelled)
         {
             throw new OperationCanceledException(_budget.Cancel);
-        }
-
-        if (status != SolveStatus.Solved && _lastLinks is not null)
-        {
-            // A neighbour's solution may be a bad start across a collapse: the answer must not depend on who was asked before.
-            _solver.Start(links);
-            status = _solver.Solve(axes, links, stresses, _budget);
         }
 
         if (status == SolveStatus.Solved)

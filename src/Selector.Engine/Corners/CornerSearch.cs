@@ -12,6 +12,22 @@ public sealed class CornerSearch
     private const int MostRounds = 4;
     private const double GoldenShare = 0.3819660112501051;
     private const double Worth = 1e-7;
+    private const int MostSections = 16;
+
+    /// <summary>A flat top is found to its square: a thousandth of the range leaves less than a millionth of the height.</summary>
+    private const double SectionEnd = 1e-3;
+
+    /// <summary>Step inwards, as a share of the range, that tells whether an end is a maximum.</summary>
+    private const double EndStep = 1e-3;
+
+    /// <summary>Relative difference below which two corners are equally bad.</summary>
+    private const double Tie = 1e-7;
+
+    /// <summary>Relative change from end to end below which an axis is not searched further: a tenth of what the corner is stated to.</summary>
+    private const double Asleep = 1e-5;
+
+    /// <summary>Relative change below which an axis is not mentioned in words.</summary>
+    private const double Felt = 1e-3;
 
     private readonly SupplyModel _model;
     private readonly ConditionPool _pool;
@@ -47,10 +63,14 @@ public sealed class CornerSearch
             worst[s] = Climb(s, severities[s]);
         }
 
-        // What one stress's climb uncovered may be worse for another than its own climb's end.
+        // What one stress's climb uncovered may be worse for another than its own climb's end; a tie keeps the own corner.
         for (var s = 0; s < stresses; s++)
         {
-            worst[s] = WorstOfPool(severities[s]);
+            if (worst[s] is { } own && WorstOfPool(severities[s]) is { } found
+                && severities[s].Of(found) > severities[s].Of(own) + Tie * Math.Abs(severities[s].Of(own)))
+            {
+                worst[s] = found;
+            }
         }
 
         return worst;
@@ -68,6 +88,24 @@ public sealed class CornerSearch
         return axis == _model.AmbientAxis && severity.FallsWithTemperature
             ? Directions.Join(push, Push.Rises)
             : push;
+    }
+
+    /// <summary>
+    /// Whether an axis is worth a word at a corner: it bears on the stress, and nothing that was solved shows that moving it to
+    /// its other end leaves the stress as it is.
+    /// </summary>
+    public bool Speaks(int stress, int axis, Severity severity, Condition at)
+    {
+        var spec = _model.Axes[axis];
+        if (spec.IsFixed || Toward(stress, axis, severity) == Push.None)
+        {
+            return false;
+        }
+
+        var other = (double[])at.Axes.Clone();
+        other[axis] = at.Axes[axis] > spec.Range.Low ? spec.Range.Low : spec.Range.High;
+        return _pool.Known(other) is not { Solved: true } moved
+            || Math.Abs(severity.Of(moved) - severity.Of(at)) > Felt * Math.Abs(severity.Of(at));
     }
 
     private double[] Vertex(int stress, Severity severity, bool searchedHigh)
@@ -90,11 +128,12 @@ public sealed class CornerSearch
 
     private Condition? Climb(int stress, Severity severity)
     {
-        if (WorstOfPool(severity) is not { } best)
+        if (Start(stress, severity) is not { } best)
         {
             return null;
         }
 
+        Span<bool> asleep = stackalloc bool[_model.Axes.Length];
         for (var round = 0; round < MostRounds; round++)
         {
             var before = severity.Of(best);
@@ -104,7 +143,7 @@ public sealed class CornerSearch
                 {
                     Push.Rises => Worse(best, Moved(best, a, _model.Axes[a].Range.High), severity),
                     Push.Falls => Worse(best, Moved(best, a, _model.Axes[a].Range.Low), severity),
-                    Push.Unproven => Along(best, a, severity, round),
+                    Push.Unproven when !asleep[a] => Along(best, a, severity, round, out asleep[a]),
                     _ => best,
                 };
             }
@@ -118,18 +157,35 @@ public sealed class CornerSearch
         return best;
     }
 
+    /// <summary>The worse of the stress's own two vertices, or whatever in the pool is worse than both.</summary>
+    private Condition? Start(int stress, Severity severity)
+    {
+        var (low, high) = (_pool.At(Vertex(stress, severity, false)), _pool.At(Vertex(stress, severity, true)));
+        var own = !low.Solved ? high : !high.Solved || severity.Of(low) >= severity.Of(high) ? low : high;
+        var found = WorstOfPool(severity);
+        return own.Solved && (found is null || severity.Of(found) <= severity.Of(own) + Tie * Math.Abs(severity.Of(own))) ? own : found;
+    }
+
     /// <summary>The worst point of one searched axis through a condition.</summary>
-    private Condition Along(Condition through, int a, Severity severity, int round)
+    /// <param name="asleep">From end to end the stress hardly moves: later rounds need not ask again.</param>
+    private Condition Along(Condition through, int a, Severity severity, int round, out bool asleep)
     {
         var axis = _model.Axes[a];
+        asleep = axis.IsFixed;
         if (axis.IsFixed)
         {
             return through;
         }
 
-        var best = Worse(through, Moved(through, a, axis.Range.Low), severity);
-        best = Worse(best, Moved(through, a, axis.Range.High), severity);
-        if (axis.EndsOnly || round > 1)
+        var (low, high) = (Moved(through, a, axis.Range.Low), Moved(through, a, axis.Range.High));
+        var best = Worse(Worse(through, low, severity), high, severity);
+        if (low.Solved && high.Solved)
+        {
+            var level = Math.Abs(severity.Of(best));
+            asleep = severity.Of(best) - Math.Min(severity.Of(low), severity.Of(high)) <= Asleep * level;
+        }
+
+        if (asleep || axis.EndsOnly || round > 1)
         {
             return best;
         }
@@ -139,7 +195,20 @@ public sealed class CornerSearch
             best = Worse(best, Moved(through, a, axis.Range.At(probe / (axis.Probes + 1.0))), severity);
         }
 
-        return best.Axes[a] > axis.Range.Low && best.Axes[a] < axis.Range.High ? Inside(best, a, severity) : best;
+        return axis.Probes > 0 && RisesInwards(best, a, severity) ? Inside(best, a, severity) : best;
+    }
+
+    /// <summary>Whether the worst point so far is inside already, or stands at an end from which severity grows inwards.</summary>
+    private bool RisesInwards(Condition best, int a, Severity severity)
+    {
+        var range = _model.Axes[a].Range;
+        if (best.Axes[a] > range.Low && best.Axes[a] < range.High)
+        {
+            return true;
+        }
+
+        var step = range.Width * (best.Axes[a] <= range.Low ? EndStep : -EndStep);
+        return Worse(best, Moved(best, a, best.Axes[a] + step), severity) != best;
     }
 
     /// <summary>A maximum between two ends, closed in on by the golden section.</summary>
@@ -149,7 +218,7 @@ public sealed class CornerSearch
         var step = axis.Range.Width / (axis.Probes + 1.0);
         var (low, high) = (Math.Max(axis.Range.Low, through.Axes[a] - step), Math.Min(axis.Range.High, through.Axes[a] + step));
         var best = through;
-        for (var i = 0; i < 16 && high - low > 1e-4 * axis.Range.Width; i++)
+        for (var i = 0; i < MostSections && high - low > SectionEnd * axis.Range.Width; i++)
         {
             var left = Moved(through, a, low + GoldenShare * (high - low));
             var right = Moved(through, a, high - GoldenShare * (high - low));

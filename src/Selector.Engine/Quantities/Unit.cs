@@ -1,3 +1,5 @@
+using System.Collections.Immutable;
+
 namespace Selector.Engine.Quantities;
 
 /// <summary>How a unit is written: with SI prefixes, as it stands, or as a fraction shown in per cent.</summary>
@@ -6,7 +8,7 @@ public enum UnitScale
     /// <summary>Takes SI prefixes: 4.7 µF, 10 kΩ.</summary>
     Prefixed,
 
-    /// <summary>Never takes a prefix: °C, K/W, h.</summary>
+    /// <summary>Never takes a prefix: °C, K/W, A²s.</summary>
     Plain,
 
     /// <summary>Kept as a fraction, written and read in per cent.</summary>
@@ -41,10 +43,19 @@ public static class Units
     public static readonly Unit Celsius = new("°C", "degree Celsius", UnitScale.Plain, "degc", "C", "degC", "deg C", "\u2103", "° C");
     public static readonly Unit Kelvin = new("K", "kelvin", UnitScale.Plain, "k", "kelvin");
     public static readonly Unit KelvinPerWatt = new("K/W", "kelvin per watt", UnitScale.Plain, "k_per_w", "K/W", "°C/W", "C/W");
-    public static readonly Unit PerKelvin = new("1/K", "per kelvin", UnitScale.Prefixed, "per_k", "/K", "K^-1");
+    public static readonly Unit PerKelvin = new("1/K", "per kelvin", UnitScale.Prefixed, "per_k", "/K", "K^-1", "/°C", "/C");
     public static readonly Unit VoltPerKelvin = new("V/K", "volt per kelvin", UnitScale.Prefixed, "v_per_k", "V/K");
-    public static readonly Unit AmpereSquaredSecond = new("A²s", "ampere squared second", UnitScale.Prefixed, "a2s", "A2s", "A^2s");
+
+    // By the SI rule kA²s is (kA)²s, a million A²s, yet data sheets mean a thousand: so no prefix, neither read nor written.
+    public static readonly Unit AmpereSquaredSecond = new("A²s", "ampere squared second", UnitScale.Plain, "a2s", "A2s", "A^2s");
     public static readonly Unit Millimetre = new("mm", "millimetre", UnitScale.Plain, "mm", "mm");
     public static readonly Unit Percent = new("%", "per cent", UnitScale.Percent, "frac", "percent", "per cent", "pct");
     public static readonly Unit One = new("", "number", UnitScale.Plain, "n");
+
+    /// <summary>Every unit of this product, in a fixed order; must stay below the fields that it lists.</summary>
+    public static ImmutableArray<Unit> All { get; } =
+    [
+        Volt, Ampere, Ohm, Farad, Henry, Hertz, Watt, VoltAmpere, Second, Hour, Celsius, Kelvin, KelvinPerWatt,
+        PerKelvin, VoltPerKelvin, AmpereSquaredSecond, Millimetre, Percent, One,
+    ];
 }

@@ -30,14 +30,14 @@ internal sealed class Directions
                 var first = model.Wiring.FirstLink(stage);
                 for (var i = 0; i < model.Stages[stage].Writes.Length; i++)
                 {
-                    changed |= Follow(model, stage, [.. model.Stages[stage].Writes[i].On], _links, first + i, linkRatings, linkRatings[first + i]);
+                    changed |= Follow(model, stage, [.. model.Stages[stage].Writes[i].On], model.Stages[stage].Writes[i].Others, _links, first + i, linkRatings, linkRatings[first + i]);
                 }
             }
         }
 
         for (var i = 0; i < model.Stresses.Length; i++)
         {
-            Follow(model, model.Stresses[i].Stage, model.Stresses[i].Spec.On, _stresses, i, linkRatings, _ratings[i]);
+            Follow(model, model.Stresses[i].Stage, model.Stresses[i].Spec.On, model.Stresses[i].Spec.Others, _stresses, i, linkRatings, _ratings[i]);
         }
     }
 
@@ -58,14 +58,14 @@ internal sealed class Directions
         one == Push.None ? other : other == Push.None || one == other ? one : Push.Unproven;
 
     private bool Follow(
-        SupplyModel model, int stage, ImmutableArray<Dependence> on, Push[,] table, int row,
+        SupplyModel model, int stage, ImmutableArray<Dependence> on, Push others, Push[,] table, int row,
         HashSet<(int, int)>[] linkRatings, HashSet<(int, int)> ratings)
     {
         var changed = false;
         var sources = model.Wiring.Inputs(stage);
         for (var i = 0; i < sources.Length; i++)
         {
-            var push = Stated(on, model.Stages[stage].Inputs[i].Id);
+            var push = Stated(on, others, model.Stages[stage].Inputs[i].Id);
             if (push == Push.None)
             {
                 continue;
@@ -106,7 +106,7 @@ internal sealed class Directions
         return changed;
     }
 
-    private static Push Stated(ImmutableArray<Dependence> on, InputId input)
+    private static Push Stated(ImmutableArray<Dependence> on, Push others, InputId input)
     {
         foreach (var d in on)
         {
@@ -116,7 +116,7 @@ internal sealed class Directions
             }
         }
 
-        return Push.Unproven;
+        return others;
     }
 
     private static HashSet<(int, int)>[] NewSets(int count) => [.. Enumerable.Range(0, count).Select(_ => new HashSet<(int, int)>())];

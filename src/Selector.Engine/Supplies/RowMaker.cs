@@ -152,7 +152,7 @@ internal sealed class RowMaker(
 
     /// <summary>What the stage had to leave out of the value for want of data.</summary>
     private string Partial() => string.Join(", ", Spec.Needs
-        .Where(n => fittings.TryGetValue(n.Position, out var f) && !f.Part.Has(n.Key))
+        .Where(n => fittings.TryGetValue(n.Position, out var f) && n.IsMissing(f.Part))
         .Select(n => $"needs {model.Registry.Family(model.Positions[model.PositionOrdinal(n.Position)].Family).Rating(n.Key).Name} of {n.Position} ({n.Without})"));
 
     private ImmutableArray<AxisFinding> Findings()
@@ -170,10 +170,15 @@ internal sealed class RowMaker(
             ?? "by way of " + string.Join(", ", Spec.On.Where(d => d.Input.Kind == InputKind.Link && d.Push is Push.Rises or Push.Falls).Select(d => d.Proof).Distinct(StringComparer.Ordinal));
     }
 
-    private string Words(Condition at) => string.Join(", ", Enumerable.Range(0, model.Axes.Length)
-        .Where(a => !model.Axes[a].IsFixed && search.Toward(stress, a, severity) != Push.None)
-        .Select(a => model.Axes[a].Words(at.Axes[a]))
-        .Where(w => w.Length > 0));
+    private string Words(Condition at)
+    {
+        // A shorted output has no load to speak of.
+        var shorted = Enumerable.Range(0, model.Axes.Length).Any(a => model.Axes[a].Id == CommonFields.ShortAxis && at.Axes[a] > 0.5);
+        return string.Join(", ", Enumerable.Range(0, model.Axes.Length)
+            .Where(a => search.Speaks(stress, a, severity, at) && !(shorted && model.Axes[a].Id == CommonFields.LoadAxis))
+            .Select(a => model.Axes[a].Words(at.Axes[a]))
+            .Where(w => w.Length > 0));
+    }
 
     private string AllAxes(Condition at) => string.Join(", ", Enumerable.Range(0, model.Axes.Length)
         .Where(a => !model.Axes[a].IsFixed)

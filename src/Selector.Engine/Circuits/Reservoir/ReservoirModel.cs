@@ -1,0 +1,107 @@
+using System.Collections.Immutable;
+using Selector.Engine.Parts;
+using Selector.Engine.Parts.Families;
+using Selector.Engine.Quantities;
+using Selector.Engine.Supplies;
+using static Selector.Engine.Circuits.Dependences;
+
+namespace Selector.Engine.Circuits.Reservoir;
+
+/// <summary>What the two front ends share: the reservoir C1 on the bus, and what the regulator draws from it.</summary>
+public abstract class ReservoirModel : StageModel
+{
+    protected const string C1 = "C1";
+
+    /// <summary>Below this share of full power the converter's own loss would be unknown; used only for stand-ins.</summary>
+    private const double EverydayEfficiency = 0.8;
+
+    private readonly int _capacitance;
+    private readonly int _tolerance;
+    private readonly int _esr;
+    private readonly int _place;
+    private readonly int _esrPlace;
+    private readonly int _firstMultiplier;
+    private readonly int _voltage;
+    private readonly int _ripple;
+    private readonly int _temperature;
+    private readonly int _ambient;
+
+    protected ReservoirModel(RequirementValues r, string lowestKey, double lowestFrequency)
+    {
+        FullPower = r[CommonFields.OutputVoltage] * r[CommonFields.LoadFull] / EverydayEfficiency;
+        _capacitance = Read(InputId.Column(C1, CapacitorFamily.Capacitance));
+        _tolerance = Read(InputId.Column(C1, CapacitorFamily.Tolerance), 0.2);
+        _esr = Read(InputId.Column(C1, CapacitorFamily.EsrLow));
+        _place = Read(InputId.Axis(ReservoirCapacitor.CapacitanceAxis(C1)));
+        _esrPlace = Read(InputId.Axis(ReservoirCapacitor.EsrAxis(C1)));
+        _ambient = Read(InputId.Axis(CommonFields.AmbientAxis));
+        Power = Read(InputId.Link(LinkNames.RegulatorPower));
+        RippleIn = Read(InputId.Link(LinkNames.RegulatorRipple));
+        FrequencyIn = Read(InputId.Link(LinkNames.RegulatorFrequency));
+        _firstMultiplier = Inputs.Length;
+        foreach (var key in FrequencyMultiplier.Keys)
+        {
+            Read(InputId.Column(C1, key), 0);
+        }
+
+        _voltage = Stress(new(C1, "voltage", "voltage, ripple peak included", Units.Volt, Side.Ceiling, new Bound.Rating(CapacitorFamily.Voltage), "V = greatest bus voltage")
+        {
+            On = VoltageOn,
+            Others = Others,
+        });
+        _ripple = Stress(new(C1, "ripple-current", "ripple current, weighted", Units.Ampere, Side.Ceiling, new Bound.Rating(CapacitorFamily.Ripple), "I = √( (I_low / m(f_low))² + (I_sw / m(f_sw))² )")
+        {
+            Needs = [ReservoirCapacitor.RippleTable(C1, lowestKey, lowestFrequency)],
+            On = RippleOn,
+            Others = Others,
+        });
+        _temperature = Stress(new(C1, "temperature", "air at its place", Units.Celsius, Side.Temperature, new Bound.Rating(CapacitorFamily.TemperatureMax), "T = ambient")
+        {
+            On = [.. Rises("it is the ambient itself", InputId.Axis(CommonFields.AmbientAxis))],
+            Others = Push.None,
+        });
+    }
+
+    /// <summary>Rough power from the bus at full load, for stand-ins only, W.</summary>
+    protected double FullPower { get; }
+
+    /// <summary>Places of the links that the regulator writes.</summary>
+    protected int Power { get; }
+
+    protected int RippleIn { get; }
+
+    protected int FrequencyIn { get; }
+
+    /// <summary>Directions of the greatest bus voltage in what the front end reads; the same for link and stress.</summary>
+    protected abstract ImmutableArray<Dependence> VoltageOn { get; }
+
+    /// <summary>Directions of the weighted ripple current.</summary>
+    protected virtual ImmutableArray<Dependence> RippleOn => [];
+
+    /// <summary>Direction of both in what is not listed.</summary>
+    protected virtual Push Others => Push.Unproven;
+
+    protected static ImmutableDictionary<string, double> CapacitorStandIn(double capacitance) => ImmutableDictionary<string, double>.Empty
+        .Add(CapacitorFamily.Capacitance, capacitance)
+        .Add(CapacitorFamily.EsrLow, 0.2 * 1e-3 / capacitance)
+        .Add(CapacitorFamily.EsrHigh, 0.1 * 1e-3 / capacitance);
+
+    protected double CapacitanceAt(ReadOnlySpan<double> inputs) =>
+        ReservoirCapacitor.Capacitance(inputs[_capacitance], inputs[_tolerance], inputs[_place]);
+
+    protected double EsrAt(ReadOnlySpan<double> inputs) => ReservoirCapacitor.Esr(inputs[_esr], inputs[_esrPlace]);
+
+    /// <summary>Writes the stresses of C1.</summary>
+    protected void WriteReservoir(ReadOnlySpan<double> inputs, Span<double> stresses, double busMax, double lowRipple, double lowFrequency)
+    {
+        Span<double> table = stackalloc double[FrequencyMultiplier.Keys.Length];
+        for (var i = 0; i < table.Length; i++)
+        {
+            table[i] = inputs[_firstMultiplier + i] is > 0 and var m ? m : double.NaN;
+        }
+
+        stresses[_voltage] = busMax;
+        stresses[_ripple] = RippleWeight.Equivalent(table, lowRipple, lowFrequency, inputs[RippleIn], inputs[FrequencyIn]);
+        stresses[_temperature] = inputs[_ambient];
+    }
+}
