@@ -1,12 +1,10 @@
 using System.Collections.Immutable;
-using System.Globalization;
 using CsvHelper;
-using CsvHelper.Configuration;
 
 namespace Selector.Application.Catalogue;
 
 /// <summary>One row of a file.</summary>
-public sealed class CsvRow(int number, IReadOnlyDictionary<string, int> columns, string[] cells)
+public sealed class CsvLine(int number, IReadOnlyDictionary<string, int> columns, string[] cells)
 {
     /// <summary>As a spreadsheet counts: the heading is row 1.</summary>
     public int Number => number;
@@ -19,18 +17,18 @@ public sealed class CsvRow(int number, IReadOnlyDictionary<string, int> columns,
 /// A file of comma-separated values (RFC 4180) with a heading, taken apart but not yet understood. Whatever is wrong with its shape
 /// becomes a fault in words; no text makes it throw.
 /// </summary>
-public sealed record CsvTable(ImmutableArray<CsvRow> Rows, ImmutableArray<RowFault> Faults)
+public sealed record CsvTable(ImmutableArray<CsvLine> Rows, ImmutableArray<RowFault> Faults)
 {
     private const int MostRows = 200_000;
     private const int MostFaults = 1000;
 
-    private static readonly CsvConfiguration Rfc4180 = new(CultureInfo.InvariantCulture)
+    private static readonly CsvReaderOptions Rfc4180 = new()
     {
-        HasHeaderRecord = false,
-        BadDataFound = null,
-        MissingFieldFound = null,
-        IgnoreBlankLines = true,
-        MaxFieldSize = 100_000,
+        Separator = ',',
+        HasHeader = false,
+        SkipEmptyLines = false,
+        TrimWhitespace = false,
+        MalformedData = CsvMalformedDataHandling.Throw,
     };
 
     /// <param name="text">The whole file.</param>
@@ -39,17 +37,17 @@ public sealed record CsvTable(ImmutableArray<CsvRow> Rows, ImmutableArray<RowFau
     public static CsvTable Read(string text, IReadOnlyCollection<string> known, IReadOnlyCollection<string> needed)
     {
         ArgumentNullException.ThrowIfNull(text);
-        var rows = ImmutableArray.CreateBuilder<CsvRow>();
+        var rows = ImmutableArray.CreateBuilder<CsvLine>();
         var faults = ImmutableArray.CreateBuilder<RowFault>();
-        using var parser = new CsvParser(new StringReader(text.TrimStart('\uFEFF')), Rfc4180);
+        using var reader = CsvReader.FromText(text.TrimStart('\uFEFF'), Rfc4180);
         try
         {
-            if (!parser.Read() || parser.Record is not { } heading)
+            if (!reader.Read())
             {
                 return new([], [new(1, "", "The file is empty.", "Give a heading and rows.")]);
             }
 
-            heading = [.. heading.Select(h => h.Trim())];
+            string[] heading = [.. Cells(reader).Select(h => h.Trim())];
             faults.AddRange(Heading(heading, known, needed));
             if (faults.Count > 0)
             {
@@ -57,36 +55,52 @@ public sealed record CsvTable(ImmutableArray<CsvRow> Rows, ImmutableArray<RowFau
             }
 
             var columns = heading.Select((h, i) => (h, i)).ToDictionary(x => x.h, x => x.i, StringComparer.Ordinal);
-            while (parser.Read() && faults.Count < MostFaults)
+            for (var number = 2; reader.Read() && faults.Count < MostFaults; number++)
             {
-                var number = parser.Row;
-                var cells = parser.Record!;
-                if (cells.Length != heading.Length)
+                var cells = Cells(reader);
+                if (cells.Length == 1 && cells[0].Length == 0)
                 {
-                    faults.Add(new(number, "", $"The row has {cells.Length} cells, the heading {heading.Length}.", "Put cells with a comma in quotation marks."));
+                    continue;
                 }
-                else if (Array.FindIndex(cells, c => !PlainText.IsKept(c)) is >= 0 and var bad)
+
+                if (Shape(number, cells, heading, rows.Count) is { } fault)
                 {
-                    faults.Add(new(number, heading[bad], "The cell has characters that cannot be stored.", "Save the file as UTF-8 and try again."));
-                }
-                else if (rows.Count == MostRows)
-                {
-                    faults.Add(new(number, "", $"The file has more than {MostRows} rows.", "Split it."));
-                    break;
+                    faults.Add(fault);
                 }
                 else
                 {
-                    rows.Add(new CsvRow(number, columns, cells));
+                    rows.Add(new CsvLine(number, columns, cells));
                 }
             }
         }
-        catch (CsvHelperException)
+        catch (CsvFormatException e)
         {
-            faults.Add(new(parser.Row, "", "The row cannot be read as comma-separated values.", "Check its quotation marks and the length of its cells."));
+            var row = (int)Math.Clamp(e.RecordNumber, 1, int.MaxValue);
+            faults.Add(new(row, "", "The row cannot be read as comma-separated values.", "Check its quotation marks."));
         }
 
         return new(rows.ToImmutable(), faults.ToImmutable());
     }
+
+    private static string[] Cells(CsvReader reader)
+    {
+        var cells = new string[reader.FieldCount];
+        for (var i = 0; i < cells.Length; i++)
+        {
+            cells[i] = reader.GetString(i);
+        }
+
+        return cells;
+    }
+
+    private static RowFault? Shape(int number, string[] cells, string[] heading, int rows) =>
+        cells.Length != heading.Length
+            ? new(number, "", $"The row has {cells.Length} cells, the heading {heading.Length}.", "Put cells with a comma in quotation marks.")
+        : Array.FindIndex(cells, c => !PlainText.IsKept(c)) is >= 0 and var bad
+            ? new(number, heading[bad], "The cell has characters that cannot be stored.", "Save the file as UTF-8 and try again.")
+        : rows == MostRows
+            ? new(number, "", $"The file has more than {MostRows} rows.", "Split it.")
+        : null;
 
     private static IEnumerable<RowFault> Heading(string[] heading, IReadOnlyCollection<string> known, IReadOnlyCollection<string> needed)
     {

@@ -13,6 +13,8 @@ public sealed record PartCsvReading(ImmutableArray<Part> Parts, ImmutableArray<R
 /// <summary>The parts of one family as CSV, in and out. Columns come from the family; a new rating needs nothing here.</summary>
 public static class PartCsv
 {
+    private static readonly CsvWriterOptions Rfc4180 = new() { Separator = ',', NewLine = "\n", HasHeader = false };
+
     /// <summary>Reads a file. Never throws on its content.</summary>
     public static PartCsvReading Read(FamilySpec family, string text)
     {
@@ -49,13 +51,13 @@ public static class PartCsv
     public static string Write(FamilySpec family, IEnumerable<Part> parts)
     {
         ArgumentNullException.ThrowIfNull(family);
-        using var text = new StringWriter(CultureInfo.InvariantCulture) { NewLine = "\n" };
-        using (var csv = new CsvWriter(text, new(CultureInfo.InvariantCulture) { NewLine = "\n" }))
+        using var text = new StringWriter(CultureInfo.InvariantCulture);
+        using (var csv = CsvWriter.Create(text, Rfc4180, leaveOpen: true))
         {
-            WriteRow(csv, PartColumns.Of(family));
+            csv.WriteRecord([.. PartColumns.Of(family)]);
             foreach (var part in parts)
             {
-                WriteRow(csv, Cells(part));
+                csv.WriteRecord([.. Cells(part)]);
             }
         }
 
@@ -81,15 +83,5 @@ public static class PartCsv
             SafeCell.Out(part.Source),
         ];
         return common.Concat(part.Family.Ratings.Zip(part.Ratings, RatingCell.Write));
-    }
-
-    private static void WriteRow(CsvWriter csv, IEnumerable<string> cells)
-    {
-        foreach (var cell in cells)
-        {
-            csv.WriteField(cell);
-        }
-
-        csv.NextRecord();
     }
 }

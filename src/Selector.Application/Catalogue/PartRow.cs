@@ -6,7 +6,7 @@ using Selector.Storage;
 namespace Selector.Application.Catalogue;
 
 /// <summary>Reads one row of a catalogue file and gathers everything that is wrong with it, not only the first.</summary>
-internal sealed class PartRow(FamilySpec family, CsvRow row)
+internal sealed class PartRow(FamilySpec family, CsvLine row)
 {
     private const int MostPieces = 1_000_000_000;
 
