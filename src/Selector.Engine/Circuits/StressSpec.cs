@@ -53,6 +53,9 @@ public sealed record StressSpec(string Position, string Kind, string Name, Unit 
     /// <summary>Ratings without which the stress is only partly computed: shown, but never passed.</summary>
     public ImmutableArray<Need> Needs { get; init; } = [];
 
+    /// <summary>A matter of fitting or not, such as the primary's voltage: it can lack, but a margin of it says nothing.</summary>
+    public bool IsMatch { get; init; }
+
     /// <summary>The temperature at which the rating is read, if it falls with temperature: the ambient unless a link is named.</summary>
     public string? TemperatureLink { get; init; }
 

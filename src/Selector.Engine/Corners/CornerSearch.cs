@@ -11,7 +11,7 @@ public sealed class CornerSearch
 {
     private const int MostRounds = 4;
     private const double GoldenShare = 0.3819660112501051;
-    private const double Worth = 1e-7;
+    private const double Worth = 1e-6;
     private const int MostSections = 16;
 
     /// <summary>A flat top is found to its square: a thousandth of the range leaves less than a millionth of the height.</summary>
@@ -21,7 +21,7 @@ public sealed class CornerSearch
     private const double EndStep = 1e-3;
 
     /// <summary>Relative difference below which two corners are equally bad.</summary>
-    private const double Tie = 1e-7;
+    private const double Tie = 1e-6;
 
     /// <summary>Relative change from end to end below which an axis is not searched further: a tenth of what the corner is stated to.</summary>
     private const double Asleep = 1e-5;
@@ -41,12 +41,26 @@ public sealed class CornerSearch
     /// <summary>The worst condition per stress; null where no condition could be solved.</summary>
     /// <param name="severities">One per stress of the model.</param>
     /// <param name="failed">Per stress, a condition at its corner that has no solution; null when there is none.</param>
-    public Condition?[] Worst(IReadOnlyList<Severity> severities, out Condition?[] failed)
+    public Condition?[] Worst(IReadOnlyList<Severity> severities, out Condition?[] failed) => Worst(severities, null, out failed);
+
+    /// <summary>
+    /// The same with the whole search only for some stresses; the others get the worst of what was solved for those, which is a
+    /// corner, but perhaps not their own worst.
+    /// </summary>
+    /// <param name="severities">One per stress of the model.</param>
+    /// <param name="focus">Places of the stresses to search for; null for all.</param>
+    /// <param name="failed">As above.</param>
+    public Condition?[] Worst(IReadOnlyList<Severity> severities, IReadOnlySet<int>? focus, out Condition?[] failed)
     {
         var stresses = _model.Stresses.Length;
         failed = new Condition?[stresses];
         for (var s = 0; s < stresses; s++)
         {
+            if (focus?.Contains(s) == false)
+            {
+                continue;
+            }
+
             foreach (var searchedHigh in (ReadOnlySpan<bool>)[false, true])
             {
                 var start = _pool.At(Vertex(s, severities[s], searchedHigh));
@@ -60,14 +74,15 @@ public sealed class CornerSearch
         var worst = new Condition?[stresses];
         for (var s = 0; s < stresses; s++)
         {
-            worst[s] = Climb(s, severities[s]);
+            worst[s] = focus?.Contains(s) == false ? null : Climb(s, severities[s]);
         }
 
         // What one stress's climb uncovered may be worse for another than its own climb's end; a tie keeps the own corner.
         for (var s = 0; s < stresses; s++)
         {
-            if (worst[s] is { } own && WorstOfPool(severities[s]) is { } found
-                && severities[s].Of(found) > severities[s].Of(own) + Tie * Math.Abs(severities[s].Of(own)))
+            var found = WorstOfPool(severities[s]);
+            if (worst[s] is not { } own
+                || (found is not null && severities[s].Of(found) > severities[s].Of(own) + Tie * Math.Abs(severities[s].Of(own))))
             {
                 worst[s] = found;
             }

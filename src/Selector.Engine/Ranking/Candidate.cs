@@ -36,10 +36,13 @@ public sealed record Candidate(
 {
     public Part Part => Fitting.Part;
 
+    /// <summary>For a part that lacks too much to be solved whole: no more than this. Null when the margins are exact.</summary>
+    public double? MarginAtMost { get; init; }
+
     /// <summary>The smallest margin of own rows and of those that it moves elsewhere.</summary>
     public double? LeastMargin => Limiting?.Margin is { } own
         ? Math.Min(own, Elsewhere?.Margin ?? own)
-        : Elsewhere?.Margin;
+        : Elsewhere?.Margin ?? MarginAtMost;
 }
 
 /// <summary>All candidates of a position, best first.</summary>

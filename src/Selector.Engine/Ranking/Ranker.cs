@@ -12,6 +12,9 @@ public static class Ranker
     /// <summary>A row elsewhere that no candidate moves by this much is not held against any of them.</summary>
     private const double Moved = 1e-3;
 
+    /// <summary>Of those that lack already on the screen, so many of the nearest are solved whole, to say exactly by how much.</summary>
+    private const int NearestAssessed = 24;
+
     /// <summary>Every part of the position's family in every arrangement that the family allows, best first.</summary>
     /// <param name="model">The supply.</param>
     /// <param name="fittings">What fills the positions now; the ranked position is replaced.</param>
@@ -28,19 +31,33 @@ public static class Ranker
         Policy policy,
         CancellationToken cancel)
     {
-        var trials = parts.SelectMany(p => Arrangements.Of(p)).ToArray();
-        var ledgers = new Ledger[trials.Length];
-        Parallel.For(0, trials.Length, new ParallelOptions { CancellationToken = cancel }, i =>
-            ledgers[i] = Assessor.Assess(model, fittings.SetItem(position, trials[i]), policy, Budget.Until(cancel)));
+        var trials = parts.SelectMany(Arrangements.Of).ToArray();
+        var least = model.Requirement[CommonFields.LeastMargin];
+        var options = new ParallelOptions { CancellationToken = cancel };
+        var screen = new Screen(model, Assessor.Assess(model, fittings, policy, Budget.Until(cancel)), policy, position);
+        var found = new Screen.Finding[trials.Length];
+        Parallel.For(0, trials.Length, options, i => found[i] = screen.Look(fittings.SetItem(position, trials[i]), cancel));
 
-        var moved = MovedRows(ledgers, position);
+        var ledgers = new Ledger?[trials.Length];
+        int[] whole = [.. Enumerable.Range(0, trials.Length).Where(i => !(found[i].Margin < least))];
+        int[] nearest = [.. Enumerable.Range(0, trials.Length).Except(whole).OrderByDescending(i => found[i].Margin).Take(NearestAssessed)];
+        int[] assessed = [.. whole, .. nearest];
+        Parallel.For(0, assessed.Length, options, n =>
+        {
+            var i = assessed[n];
+            ledgers[i] = Assessor.Assess(model, fittings.SetItem(position, trials[i]), policy, found[i].Pool, found[i].Focus);
+        });
+
+        var moved = MovedRows([.. ledgers.OfType<Ledger>()], position);
         var spec = model.Positions[model.PositionOrdinal(position)];
-        var candidates = trials.Select((t, i) => Candidate(model, spec, t, ledgers[i], moved)).Order(CandidateOrder.Best);
+        var candidates = trials
+            .Select((t, i) => ledgers[i] is { } ledger ? Assessed(model, spec, t, ledger, moved) : ScreenedOut(model, spec, t, found[i], least))
+            .Order(CandidateOrder.Best);
         return new Ranking(position, [.. candidates]);
     }
 
     /// <summary>Rows at other positions whose margin differs from candidate to candidate.</summary>
-    private static HashSet<string> MovedRows(Ledger[] ledgers, string position) => ledgers
+    private static HashSet<string> MovedRows(IReadOnlyList<Ledger> ledgers, string position) => ledgers
         .SelectMany(l => l.Rows)
         .Where(r => r.Position != position && r.Margin is not null)
         .GroupBy(r => r.Id, StringComparer.Ordinal)
@@ -48,7 +65,7 @@ public static class Ranker
         .Select(g => g.Key)
         .ToHashSet(StringComparer.Ordinal);
 
-    private static Candidate Candidate(SupplyModel model, PositionSpec spec, Fitting trial, Ledger ledger, HashSet<string> moved)
+    private static Candidate Assessed(SupplyModel model, PositionSpec spec, Fitting trial, Ledger ledger, HashSet<string> moved)
     {
         var own = ledger.Positions.Single(p => p.Spec.Id == spec.Id).Rows
             .Where(r => r.Verdict != Verdict.NotAssessed).ToImmutableArray();
@@ -56,14 +73,29 @@ public static class Ranker
         var elsewhere = ledger.Rows
             .Where(r => r.Position != spec.Id && r.Margin is not null && moved.Contains(r.Id))
             .MinBy(r => r.Margin);
-        var order = OrderQuantity.Of(
-            trial.Part, spec.Quantity * trial.Count,
-            (int)model.Requirement[CommonFields.Units], model.Requirement[CommonFields.Spares]);
-        var least = model.Requirement[CommonFields.LeastMargin];
-        var (standing, reason) = Stand(own, limiting, elsewhere, least);
+        var (standing, reason) = Stand(own, limiting, elsewhere, model.Requirement[CommonFields.LeastMargin]);
+        var order = Order(model, spec, trial);
         return new Candidate(
             trial, standing, own, limiting, elsewhere, order.Unit * (spec.Quantity * trial.Count), order.Extended, reason);
     }
+
+    /// <summary>A trial that lacks too much to be solved whole: its margin is known from above only.</summary>
+    private static Candidate ScreenedOut(SupplyModel model, PositionSpec spec, Fitting trial, Screen.Finding bound, double least)
+    {
+        var margin = bound.Margin!.Value;
+        var order = Order(model, spec, trial);
+        var standing = double.IsFinite(margin) ? Standing.Lacks : Standing.NotUsable;
+        var reason = double.IsFinite(margin)
+            ? Lack(bound.Stress!.Name, margin, least) + " or more"
+            : $"{bound.Stress!.Name}: nothing is allowed under these conditions";
+        return new Candidate(trial, standing, [], null, null, order.Unit * (spec.Quantity * trial.Count), order.Extended, reason)
+        {
+            MarginAtMost = double.IsFinite(margin) ? margin : null,
+        };
+    }
+
+    private static OrderQuantity Order(SupplyModel model, PositionSpec spec, Fitting trial) => OrderQuantity.Of(
+        trial.Part, spec.Quantity * trial.Count, (int)model.Requirement[CommonFields.Units], model.Requirement[CommonFields.Spares]);
 
     private static (Standing Standing, string Reason) Stand(
         ImmutableArray<LedgerRow> own, LedgerRow? limiting, LedgerRow? elsewhere, double least)

@@ -24,12 +24,22 @@ public static class Assessor
         SupplyModel model, IReadOnlyDictionary<string, Fitting> fittings, Policy policy, in Budget budget)
     {
         var pool = new ConditionPool(model, new SupplySolver(model, fittings), budget);
+        return Assess(model, fittings, policy, pool, null);
+    }
+
+    /// <summary>
+    /// The same from conditions that are solved already, with the whole search only for some stresses: the rows of the others are
+    /// true at the corner that they state, which may not be their worst.
+    /// </summary>
+    internal static Ledger Assess(
+        SupplyModel model, IReadOnlyDictionary<string, Fitting> fittings, Policy policy, ConditionPool pool, IReadOnlySet<int>? focus)
+    {
         Severity[] severities =
         [
             .. model.Stresses.Select((s, i) => new Severity(model, i, fittings.GetValueOrDefault(s.Spec.Position), policy)),
         ];
         var search = new CornerSearch(model, pool);
-        var worst = search.Worst(severities, out var failed);
+        var worst = search.Worst(severities, focus, out var failed);
         var rows = new LedgerRow[model.Stresses.Length];
         for (var i = 0; i < rows.Length; i++)
         {

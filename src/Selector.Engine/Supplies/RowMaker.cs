@@ -102,6 +102,11 @@ internal sealed class RowMaker(
             return row with { Verdict = Verdict.NoDemand, Margin = null, MarginUnderated = null };
         }
 
+        if (Spec.IsMatch && row.Margin >= 0)
+        {
+            return row with { Verdict = fitted ? Verdict.Holds : Verdict.NoPart, Margin = null, MarginUnderated = null };
+        }
+
         return row with { Verdict = !fitted ? Verdict.NoPart : row.Margin >= 0 ? Verdict.Holds : Verdict.Lacks };
     }
 

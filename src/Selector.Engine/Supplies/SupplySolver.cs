@@ -8,8 +8,8 @@ namespace Selector.Engine.Supplies;
 /// </summary>
 public sealed class SupplySolver
 {
-    private const int MostSweeps = 120; public static long Sweeps, Solves;
-    private const double LinkTolerance = 1e-9;
+    private const int MostSweeps = 60; public static long Sweeps, Solves;
+    private const double LinkTolerance = 1e-7;
 
     /// <summary>Sweeps by plain substitution before a loop that does not settle is left unaccelerated for good.</summary>
     private const int TrustedSweeps = 30;

@@ -28,12 +28,13 @@ internal sealed class MainsStresses
         _nominalFrequency = nominalFrequency;
         var d = topology.Rectifier;
         _secondary = stress(new(T1, "secondary-current", "secondary current, rms", Units.Ampere, Side.Ceiling, new Bound.Rating(TransformerFamily.Current), "I = √( mean of i² ) of the solved pulses") { On = CurrentOn(topology) });
-        _primary = stress(new(T1, "primary-voltage", "nominal mains on the primary", Units.Volt, Side.Ceiling, new Bound.Limit(TransformerFamily.Primary), "V = nominal mains") { Others = Push.None });
-        _frequency = stress(new(T1, "frequency", "nominal frequency, at least", Units.Hertz, Side.Floor, new Bound.Limit(TransformerFamily.FrequencyMin), "f = nominal mains frequency") { Others = Push.None });
+        _primary = stress(new(T1, "primary-voltage", "nominal mains on the primary", Units.Volt, Side.Ceiling, new Bound.Limit(TransformerFamily.Primary), "V = nominal mains") { Others = Push.None, IsMatch = true });
+        _frequency = stress(new(T1, "frequency", "nominal frequency, at least", Units.Hertz, Side.Floor, new Bound.Limit(TransformerFamily.FrequencyMin), "f = nominal mains frequency") { Others = Push.None, IsMatch = true });
         _halves = stress(new(T1, "halves", "secondary halves, at least", Units.One, Side.Floor, new Bound.Required(topology.Halves, MainsStage.FrontEnd), "as the front end needs")
         {
             On = [new Dependence(InputId.Column(T1, TransformerFamily.Halves), Push.Rises, "it is the number itself")],
             Others = Push.None,
+            IsMatch = true,
         });
         _reverse = stress(new(d, "reverse-voltage", "reverse voltage", Units.Volt, Side.Ceiling, new Bound.Rating(RectifierRatings.Reverse), topology.Arrangement == RectifierArrangement.Bridge
             ? "V = greatest voltage across a blocking diode of the bridge" : "V = secondary peak + bus") { On = busOn });

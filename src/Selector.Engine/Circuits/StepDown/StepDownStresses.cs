@@ -38,8 +38,8 @@ internal sealed class StepDownStresses
             { On = [.. Falls("more input, less duty", BusMax), .. None("taken at full load; below it pulses are skipped", Load), .. Rises("when shorted the least on-time is part of the model", Short), .. NotAt(BusMin, BusMean)] });
         _output = stress(new(U1, "output-current", "output current", Units.Ampere, Side.Ceiling, new Bound.Rating(RegulatorFamily.OutputCurrent), "I = load")
             { On = [.. Rises("it is the load", Load)], Others = Push.None });
-        _outputLow = stress(new(U1, "output-low", "output, at least", Units.Volt, Side.Floor, new Bound.Limit(RegulatorFamily.OutputMin), "V = output asked") { Others = Push.None });
-        _outputHigh = stress(new(U1, "output-high", "output", Units.Volt, Side.Ceiling, new Bound.Limit(RegulatorFamily.OutputMax), "V = output asked") { Others = Push.None });
+        _outputLow = stress(new(U1, "output-low", "output, at least", Units.Volt, Side.Floor, new Bound.Limit(RegulatorFamily.OutputMin), "V = output asked") { Others = Push.None, IsMatch = true });
+        _outputHigh = stress(new(U1, "output-high", "output", Units.Volt, Side.Ceiling, new Bound.Limit(RegulatorFamily.OutputMax), "V = output asked") { Others = Push.None, IsMatch = true });
         _switch = stress(new(U1, "switch-current", "switch peak before its limit", Units.Ampere, Side.Ceiling, new Bound.Rating(RegulatorFamily.LimitMin), "I = I_load + ΔI / 2, exact") { On = Peak });
         _reverse = stress(new(D5, "reverse-voltage", "reverse voltage", Units.Volt, Side.Ceiling, new Bound.Rating(RectifierRatings.Reverse), "V = greatest bus voltage, the closed switch without drop")
             { On = [.. Rises("it is the top of the bus", BusMax)], Others = Push.None });

@@ -1,0 +1,83 @@
+using System.Collections.Immutable;
+using Selector.Engine.Circuits;
+using Selector.Engine.Corners;
+using Selector.Engine.Derating;
+using Selector.Engine.Supplies;
+
+namespace Selector.Engine.Ranking;
+
+/// <summary>
+/// Looks at a trial at the corners of the supply as it is fitted now. Each is a legitimate condition, so the worst margin found
+/// there is an upper bound of the trial's margin: a trial that lacks here lacks, whatever its own corners are.
+/// </summary>
+internal sealed class Screen
+{
+    /// <summary>A trial that lacks by this much is not looked at further.</summary>
+    private const double Hopeless = -0.5;
+
+    /// <summary>Stresses at other positions that are searched for with a trial: only the tightest decides.</summary>
+    private const int TightestElsewhere = 3;
+
+    private readonly SupplyModel _model;
+    private readonly Policy _policy;
+    private readonly string _position;
+    private readonly double[][] _corners;
+
+    public Screen(SupplyModel model, Ledger now, Policy policy, string position)
+    {
+        _model = model;
+        _policy = policy;
+        _position = position;
+        _corners =
+        [
+            .. now.Rows
+                .Where(r => r.At.Count == model.Axes.Length)
+                .OrderByDescending(r => r.Position == position)
+                .Select(r => model.Axes.Select(a => r.At[a.Id]).ToArray())
+                .DistinctBy(a => string.Join('|', a.Select(v => v.ToString("R", System.Globalization.CultureInfo.InvariantCulture)))),
+        ];
+    }
+
+    /// <summary>What the screen found.</summary>
+    /// <param name="Pool">The conditions that it solved, for the search that follows.</param>
+    /// <param name="Margin">Upper bound of the trial's own margin; null when no own stress can be judged.</param>
+    /// <param name="Stress">The stress that sets it.</param>
+    /// <param name="Focus">Stresses worth a search: the trial's own, and the tightest elsewhere.</param>
+    public sealed record Finding(ConditionPool Pool, double? Margin, StressSpec? Stress, IReadOnlySet<int> Focus);
+
+    /// <summary>Looks at a trial.</summary>
+    public Finding Look(ImmutableSortedDictionary<string, Fitting> fittings, CancellationToken cancel)
+    {
+        var pool = new ConditionPool(_model, new SupplySolver(_model, fittings), Budget.Until(cancel));
+        var margins = new double[_model.Stresses.Length];
+        Array.Fill(margins, double.PositiveInfinity);
+        Severity[] severities =
+        [
+            .. _model.Stresses.Select((s, i) => new Severity(_model, i, fittings.GetValueOrDefault(s.Spec.Position), _policy)),
+        ];
+        var worst = -1;
+        foreach (var corner in _corners)
+        {
+            var at = pool.At(corner);
+            for (var i = 0; at.Solved && i < margins.Length; i++)
+            {
+                if (severities[i].Allowed(at) is var allowed && !double.IsNaN(allowed))
+                {
+                    margins[i] = Math.Min(margins[i], 1 - severities[i].Of(at, allowed));
+                    worst = IsOwn(i) && (worst < 0 || margins[i] < margins[worst]) ? i : worst;
+                }
+            }
+
+            if (worst >= 0 && margins[worst] < Hopeless)
+            {
+                break;
+            }
+        }
+
+        var tightest = Enumerable.Range(0, margins.Length).Where(i => !IsOwn(i)).OrderBy(i => margins[i]).Take(TightestElsewhere);
+        var focus = Enumerable.Range(0, margins.Length).Where(IsOwn).Concat(tightest).ToHashSet();
+        return new Finding(pool, worst < 0 ? null : margins[worst], worst < 0 ? null : _model.Stresses[worst].Spec, focus);
+    }
+
+    private bool IsOwn(int stress) => _model.Stresses[stress].Spec.Position == _position;
+}
