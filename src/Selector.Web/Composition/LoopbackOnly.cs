@@ -1,0 +1,34 @@
+using System.Net;
+using Microsoft.AspNetCore.Server.Kestrel.Core;
+
+namespace Selector.Web.Composition;
+
+/// <summary>While there are no accounts, whoever reaches the server is its owner: so nobody may reach it from another machine.</summary>
+public static class LoopbackOnly
+{
+    /// <summary>Whether an address to listen on is given by command line, environment or settings.</summary>
+    public static bool IsAddressGiven(IConfiguration configuration) =>
+        new[] { "urls", "http_ports", "https_ports" }.Any(key => !string.IsNullOrWhiteSpace(configuration[key]))
+        || configuration.GetSection("Kestrel:Endpoints").GetChildren().Any();
+
+    /// <summary>Asked by the server for every end point that it is about to bind, wherever that was configured.</summary>
+    /// <exception cref="NotLoopbackException">The end point can be reached from another machine.</exception>
+    public static void Demand(ListenOptions endpoint)
+    {
+        ArgumentNullException.ThrowIfNull(endpoint);
+
+        // "localhost" has no single address: the server then binds both loopback addresses and nothing else.
+        if (endpoint.IPEndPoint is { } ip && !IPAddress.IsLoopback(ip.Address))
+        {
+            throw new NotLoopbackException(ip.ToString());
+        }
+    }
+}
+
+/// <summary>The server was told to listen where other machines could reach it.</summary>
+public sealed class NotLoopbackException(string address) : Exception(
+    $"Selector does not listen on {address}: there are no accounts yet, so whoever reaches the server owns it. "
+    + "Give a loopback address, for example --urls http://127.0.0.1:5080")
+{
+    public string Address { get; } = address;
+}

@@ -1,0 +1,37 @@
+using System.Net;
+
+namespace Selector.Web.Composition;
+
+/// <summary>
+/// Refuses what a page of another site could send through the browser of whoever sits here: requests under a foreign host name (a
+/// name that was pointed at the loopback address) and requests that a foreign origin starts.
+/// </summary>
+public static class SameSite
+{
+    public static Task Guard(HttpContext context, RequestDelegate next)
+    {
+        ArgumentNullException.ThrowIfNull(context);
+        ArgumentNullException.ThrowIfNull(next);
+        var request = context.Request;
+        if (!IsThisMachine(request.Host.Host))
+        {
+            return Refuse(context, StatusCodes.Status400BadRequest, "This server only answers under a loopback name, such as 127.0.0.1 or localhost.");
+        }
+
+        var origin = request.Headers.Origin.ToString();
+        return origin.Length > 0 && origin != $"{request.Scheme}://{request.Host}"
+            ? Refuse(context, StatusCodes.Status403Forbidden, "The request came from a page of another site.")
+            : next(context);
+    }
+
+    private static bool IsThisMachine(string host) =>
+        string.Equals(host, "localhost", StringComparison.OrdinalIgnoreCase)
+        || (IPAddress.TryParse(host, out var address) && IPAddress.IsLoopback(address));
+
+    private static Task Refuse(HttpContext context, int status, string reason)
+    {
+        context.Response.StatusCode = status;
+        context.Response.ContentType = "text/plain; charset=utf-8";
+        return context.Response.WriteAsync(reason, context.RequestAborted);
+    }
+}

@@ -1,0 +1,18 @@
+using Microsoft.AspNetCore.ResponseCompression;
+
+namespace Selector.Web.Composition;
+
+/// <summary>What the pages need besides the desks.</summary>
+internal static class WebServices
+{
+    public static IServiceCollection AddSelectorWeb(this IServiceCollection services)
+    {
+        services.AddRazorComponents().AddInteractiveServerComponents();
+        services.AddResponseCompression(o =>
+        {
+            o.Providers.Add<BrotliCompressionProvider>();
+            o.Providers.Add<GzipCompressionProvider>();
+        });
+        return services;
+    }
+}
