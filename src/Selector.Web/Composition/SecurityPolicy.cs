@@ -9,7 +9,13 @@ internal static class SecurityPolicy
         .AddReferrerPolicyNoReferrer()
         .AddCrossOriginOpenerPolicy(p => p.SameOrigin())
         .AddCrossOriginResourcePolicy(p => p.SameOrigin())
-        .AddPermissionsPolicyWithDefaultSecureDirectives()
+        .AddPermissionsPolicy(p =>
+        {
+            p.AddCamera().None();
+            p.AddGeolocation().None();
+            p.AddMicrophone().None();
+            p.AddPayment().None();
+        })
         .RemoveServerHeader()
         .AddContentSecurityPolicy(csp =>
         {

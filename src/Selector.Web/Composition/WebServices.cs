@@ -1,4 +1,5 @@
 using Microsoft.AspNetCore.ResponseCompression;
+using Selector.Web.Session;
 
 namespace Selector.Web.Composition;
 
@@ -13,6 +14,8 @@ internal static class WebServices
             o.Providers.Add<BrotliCompressionProvider>();
             o.Providers.Add<GzipCompressionProvider>();
         });
+        services.AddSingleton<SheetWork>();
+        services.AddSingleton<PaperMaker>();
         return services;
     }
 }

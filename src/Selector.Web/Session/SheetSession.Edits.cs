@@ -18,7 +18,7 @@ public sealed partial class SheetSession
 
     /// <summary>Fits a part, or empties the position with null.</summary>
     public Task Fit(string position, Fitting? fitting) =>
-        Edit(SupplyFields.Fit(position), State!.Fit(position), fitting is null ? "" : work.Text(fitting));
+        Edit(SupplyFields.Fit(position), State!.Fit(position), FittingText.Format(fitting));
 
     public async Task Undo() => await Settle(await supplies.Undo(number, by), "", "");
 

@@ -58,7 +58,9 @@ public sealed partial class SheetSession
         Changed?.Invoke();
         if (await run)
         {
-            Say($"{position}: {ranking.Ranking!.Candidates.Length} candidates, {ranking.Ranking.Holding} hold.");
+            Say(ranking.Fault.Length > 0 || ranking.Ranking is null
+                ? $"{position}: {ranking.Fault}"
+                : $"{position}: {ranking.Ranking.Candidates.Length} candidates, {ranking.Ranking.Holding} hold.");
         }
     }
 }

@@ -1,3 +1,5 @@
+using System.Collections.Immutable;
+using Selector.Application.Assessing;
 using Selector.Application.Supplies;
 using Selector.Engine.Supplies;
 
@@ -26,9 +28,12 @@ public sealed partial class SheetSession(int number, SupplyDesk supplies, SheetW
     public Assessment? Assessment { get; private set; }
 
     /// <summary>The ledger shown is from before a fault or before the edit that is being solved.</summary>
-    public bool IsOld => Assessment is { } a && State is { } s && a.Version != s.Version;
+    public bool IsOld => Assessment is { } a && State is { } s && a.State.Version != s.Version;
 
     public bool IsBusy => _solving.IsBusy;
+
+    /// <summary>What is wrong besides the fields: fittings that could not be read, or why nothing was solved.</summary>
+    public ImmutableArray<string> Faults { get; private set; } = [];
 
     /// <summary>Last thing said to a screen reader.</summary>
     public string Said { get; private set; } = "";
@@ -92,13 +97,35 @@ public sealed partial class SheetSession(int number, SupplyDesk supplies, SheetW
 
         var run = _solving.Run(cancel => work.Assess(state, cancel));
         Changed?.Invoke();
-        if (await run is { } assessment)
+        try
         {
-            Assessment = assessment;
-            var counts = assessment.Ledger.Counts;
-            Say($"Solved: {counts.Hold} hold, {counts.Lack} lack, {counts.NotRated} not rated, {counts.Empty} empty.");
-            await RankOpenRows();
+            if (await run is { } assessment)
+            {
+                await Take(assessment);
+            }
         }
+        catch (SolverBusyException busy)
+        {
+            Faults = [busy.Message];
+            Say(busy.Message);
+        }
+    }
+
+    private async Task Take(Assessment assessment)
+    {
+        Faults = assessment.Faults;
+        if (assessment.Ledger.Fault is { } fault)
+        {
+            // The last good ledger stays, marked old.
+            Faults = Faults.Insert(0, fault);
+            Say(fault);
+            return;
+        }
+
+        Assessment = assessment;
+        var counts = assessment.Ledger.Counts;
+        Say($"Solved: {counts.Hold} hold, {counts.Lack} lack, {counts.NotRated} not rated, {counts.Empty} empty.");
+        await RankOpenRows();
     }
 
     private void Say(string words)

@@ -46,13 +46,18 @@ internal static class Shown
     /// <summary>Whole number with narrow spaces between thousands.</summary>
     public static string Count(long count) => count.ToString("#,0", Thousands);
 
-    /// <summary>A moment in the reader's day: "14:02" today, else with its date.</summary>
-    public static string Time(DateTime utc, TimeProvider clock)
-    {
-        var local = TimeZoneInfo.ConvertTimeFromUtc(DateTime.SpecifyKind(utc, DateTimeKind.Utc), clock.LocalTimeZone);
-        var form = local.Date == clock.GetLocalNow().Date ? "HH:mm" : "d MMM yyyy HH:mm";
-        return local.ToString(form, System.Globalization.CultureInfo.InvariantCulture);
-    }
+    /// <summary>A moment as the reader's clock shows it: "14:02" today, else with its date.</summary>
+    public static string Time(DateTime utc, TimeProvider clock) =>
+        Local(utc, clock) is var local && local.Date == clock.GetLocalNow().Date
+            ? local.ToString("HH:mm", System.Globalization.CultureInfo.InvariantCulture)
+            : Moment(utc, clock);
+
+    /// <summary>With its date in any case, for what is printed.</summary>
+    public static string Moment(DateTime utc, TimeProvider clock) =>
+        Local(utc, clock).ToString("d MMM yyyy HH:mm", System.Globalization.CultureInfo.InvariantCulture);
+
+    private static DateTime Local(DateTime utc, TimeProvider clock) =>
+        TimeZoneInfo.ConvertTimeFromUtc(DateTime.SpecifyKind(utc, DateTimeKind.Utc), clock.LocalTimeZone);
 
     /// <summary>Name of an element that belongs to a row, position or field; only what an address may hold.</summary>
     public static string Anchor(string kind, string id) =>
