@@ -32,6 +32,9 @@ internal sealed class RectifierKind : ICaseKind
         ("p_esr_w", s => s.EsrLoss),
     ];
 
+    /// <summary>The reference's diodes have 1 nS in parallel; at high voltage its loss shows.</summary>
+    private const double ReferenceConductance = 1e-9;
+
     public string Name => "rectifier";
 
     public ImmutableArray<string> Computed { get; } = ["collapses", .. Figures.Select(f => f.Column)];
@@ -66,6 +69,6 @@ internal sealed class RectifierKind : ICaseKind
         };
         return new RectifierCase(
             arrangement, row.Number("f_line_hz"), row.Number("v_sec_rms_v"), row.Number("rw_ohm", 0), row.Number("lk_henry", 0),
-            row.Number("vf0_v", 0), row.Number("rd_ohm", 0), row.Number("c_farad"), row.Number("esr_ohm", 0), kind, load);
+            row.Number("vf0_v", 0), row.Number("rd_ohm", 0), row.Number("c_farad"), row.Number("esr_ohm", 0), kind, load, ReferenceConductance);
     }
 }

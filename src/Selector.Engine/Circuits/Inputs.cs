@@ -75,4 +75,7 @@ public sealed record LinkSpec(string Name, Unit Unit, double Start, params Depen
 {
     /// <summary>Direction in the inputs that are not listed: unproven, or none where the equation does not contain them.</summary>
     public Push Others { get; init; } = Push.Unproven;
+
+    /// <summary>Not a quantity of the circuit but where the stage's next search begins: no loop waits for it to settle.</summary>
+    public bool IsHint { get; init; }
 }

@@ -55,13 +55,6 @@ public sealed class ConditionPool
             throw new OperationCanceledException(_budget.Cancel);
         }
 
-        if (status != SolveStatus.Solved && _lastLinks is not null)
-        {
-            // A neighbour's solution may be a bad start across a collapse: the answer must not depend on who was asked before.
-            _solver.Start(links);
-            status = _solver.Solve(axes, links, stresses, _budget);
-        }
-
         if (status == SolveStatus.Solved)
         {
             _lastLinks = links;

@@ -23,6 +23,9 @@ public sealed class CornerSearch
     /// <summary>Relative difference below which two corners are equally bad.</summary>
     private const double Tie = 1e-7;
 
+    /// <summary>Relative change from end to end below which an axis is not searched further: a tenth of what the corner is stated to.</summary>
+    private const double Asleep = 1e-5;
+
     /// <summary>Relative change below which an axis is not mentioned in words.</summary>
     private const double Felt = 1e-3;
 
@@ -130,6 +133,7 @@ public sealed class CornerSearch
             return null;
         }
 
+        Span<bool> asleep = stackalloc bool[_model.Axes.Length];
         for (var round = 0; round < MostRounds; round++)
         {
             var before = severity.Of(best);
@@ -139,7 +143,7 @@ public sealed class CornerSearch
                 {
                     Push.Rises => Worse(best, Moved(best, a, _model.Axes[a].Range.High), severity),
                     Push.Falls => Worse(best, Moved(best, a, _model.Axes[a].Range.Low), severity),
-                    Push.Unproven => Along(best, a, severity, round),
+                    Push.Unproven when !asleep[a] => Along(best, a, severity, round, out asleep[a]),
                     _ => best,
                 };
             }
@@ -163,17 +167,25 @@ public sealed class CornerSearch
     }
 
     /// <summary>The worst point of one searched axis through a condition.</summary>
-    private Condition Along(Condition through, int a, Severity severity, int round)
+    /// <param name="asleep">From end to end the stress hardly moves: later rounds need not ask again.</param>
+    private Condition Along(Condition through, int a, Severity severity, int round, out bool asleep)
     {
         var axis = _model.Axes[a];
+        asleep = axis.IsFixed;
         if (axis.IsFixed)
         {
             return through;
         }
 
-        var best = Worse(through, Moved(through, a, axis.Range.Low), severity);
-        best = Worse(best, Moved(through, a, axis.Range.High), severity);
-        if (axis.EndsOnly || round > 1)
+        var (low, high) = (Moved(through, a, axis.Range.Low), Moved(through, a, axis.Range.High));
+        var best = Worse(Worse(through, low, severity), high, severity);
+        if (low.Solved && high.Solved)
+        {
+            var level = Math.Abs(severity.Of(best));
+            asleep = severity.Of(best) - Math.Min(severity.Of(low), severity.Of(high)) <= Asleep * level;
+        }
+
+        if (asleep || axis.EndsOnly || round > 1)
         {
             return best;
         }

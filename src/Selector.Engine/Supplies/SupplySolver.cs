@@ -8,12 +8,19 @@ namespace Selector.Engine.Supplies;
 /// </summary>
 public sealed class SupplySolver
 {
-    private const int MostSweeps = 80;
+    private const int MostSweeps = 120; public static long Sweeps, Solves;
     private const double LinkTolerance = 1e-9;
+
+    /// <summary>Sweeps by plain substitution before a loop that does not settle is left unaccelerated for good.</summary>
+    private const int TrustedSweeps = 30;
+
+    private const double Damping = 0.5;
 
     private readonly SupplyModel _model;
     private readonly double[][] _inputs;
     private readonly double[] _before;
+    private readonly int[] _loop;
+    private readonly LoopAcceleration _acceleration;
 
     /// <param name="model">The stages, wired.</param>
     /// <param name="fittings">Parts by position; an empty position is solved with the stage's stand-in.</param>
@@ -21,6 +28,8 @@ public sealed class SupplySolver
     {
         _model = model;
         _before = new double[model.Links.Length];
+        _loop = [.. Enumerable.Range(0, model.Links.Length).Where(i => !model.Links[i].IsHint)];
+        _acceleration = new LoopAcceleration(_loop);
         _inputs = new double[model.Stages.Length][];
         for (var stage = 0; stage < model.Stages.Length; stage++)
         {
@@ -35,6 +44,21 @@ public sealed class SupplySolver
     /// <param name="budget">Bound on work.</param>
     public SolveStatus Solve(ReadOnlySpan<double> axes, Span<double> links, Span<double> stresses, in Budget budget)
     {
+        var status = Close(axes, links, stresses, true, budget);
+        if (status is SolveStatus.Solved or SolveStatus.Cancelled)
+        {
+            return status;
+        }
+
+        // A combination of sweeps, or a neighbour's solution, may lie across a collapse. Creeping up from a lightly loaded bus
+        // finds the operating point that a charged supply settles at, if there is one.
+        Start(links);
+        return Close(axes, links, stresses, false, budget);
+    }
+
+    private SolveStatus Close(ReadOnlySpan<double> axes, Span<double> links, Span<double> stresses, bool accelerated, in Budget budget)
+    {
+        _acceleration.Restart();
         for (var sweep = 0; sweep < MostSweeps; sweep++)
         {
             if (budget.Cancel.IsCancellationRequested)
@@ -52,6 +76,15 @@ public sealed class SupplySolver
             if (Settled(links))
             {
                 return Sweep(axes, links, stresses, budget);
+            }
+
+            if (!accelerated)
+            {
+                Damp(links);
+            }
+            else if (sweep < TrustedSweeps)
+            {
+                _acceleration.Next(_before, links);
             }
         }
 
@@ -98,9 +131,17 @@ public sealed class SupplySolver
         return AllFinite(links) && AllFinite(stresses) ? SolveStatus.Solved : SolveStatus.BadInput;
     }
 
+    private void Damp(Span<double> links)
+    {
+        foreach (var i in _loop)
+        {
+            links[i] = _before[i] + Damping * (links[i] - _before[i]);
+        }
+    }
+
     private bool Settled(ReadOnlySpan<double> links)
     {
-        for (var i = 0; i < links.Length; i++)
+        foreach (var i in _loop)
         {
             if (Math.Abs(links[i] - _before[i]) > LinkTolerance * Math.Max(Math.Abs(links[i]), 1e-3))
             {

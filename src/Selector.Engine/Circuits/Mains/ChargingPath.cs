@@ -6,6 +6,10 @@ internal readonly struct ChargingPath
     /// <summary>Below this share of the resistance at the line frequency a leakage is no longer felt, and its equation too stiff.</summary>
     private const double LeastReactance = 1e-7;
 
+    private readonly RectifierArrangement _arrangement;
+    private readonly double _diodeThreshold;
+    private readonly double _diodeSlope;
+
     public ChargingPath(in RectifierCase c)
     {
         Omega = 2 * Math.PI * c.Frequency;
@@ -15,9 +19,13 @@ internal readonly struct ChargingPath
         Inductance = Omega * c.Leakage < LeastReactance * (Resistance + c.Esr) ? 0 : c.Leakage;
         Capacitance = c.Capacitance;
         Esr = c.Esr;
+        _arrangement = c.Arrangement;
+        _diodeThreshold = c.DiodeThreshold;
+        _diodeSlope = c.DiodeSlope;
         Kind = c.LoadKind;
         Load = c.Load;
-        Cycle = (c.Arrangement == RectifierArrangement.HalfWave ? 1 : 0.5) / c.Frequency;
+        PulsesPerPeriod = c.Arrangement == RectifierArrangement.HalfWave ? 1 : 2;
+        Cycle = 1 / (PulsesPerPeriod * c.Frequency);
         Collapsed = 0.3 * Peak;
     }
 
@@ -39,6 +47,9 @@ internal readonly struct ChargingPath
 
     public double Load { get; }
 
+    /// <summary>Charging pulses in one period of the mains.</summary>
+    public int PulsesPerPeriod { get; }
+
     /// <summary>Time from pulse to pulse, s.</summary>
     public double Cycle { get; }
 
@@ -54,6 +65,26 @@ internal readonly struct ChargingPath
         LoadKind.Current => Load,
         LoadKind.Resistance => v / Load,
         _ => Load / v,
+    };
+
+    /// <summary>Mean over all diodes of the square of the reverse voltage while a pulse flows, V².</summary>
+    public double ReverseSquareInPulse(double v, double j, double emf)
+    {
+        var reverse = _arrangement switch
+        {
+            RectifierArrangement.Bridge => v + _diodeThreshold + _diodeSlope * j,
+            RectifierArrangement.CentreTap => v + emf,
+            _ => 0,
+        };
+        return reverse * reverse / 2;
+    }
+
+    /// <summary>The same between pulses; a bridge's floating winding lies half-way, so that its diodes share.</summary>
+    public double ReverseSquareAtRest(double v, double emf) => _arrangement switch
+    {
+        RectifierArrangement.Bridge => (v * v + emf * emf) / 4,
+        RectifierArrangement.CentreTap => v * v + emf * emf,
+        _ => (v - emf) * (v - emf),
     };
 
     /// <summary>Terminal voltage with no charging current; NaN where a constant power leaves none.</summary>

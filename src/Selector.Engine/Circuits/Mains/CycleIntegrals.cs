@@ -1,12 +1,15 @@
 namespace Selector.Engine.Circuits.Mains;
 
-/// <summary>Integrals over one cycle, by Gauss-Legendre panels of five points: exact to rounding for the smooth pieces between edges.</summary>
+/// <summary>Integrals over one cycle, by Gauss-Legendre panels: exact to some 1e-9 for the smooth pieces between edges.</summary>
 internal struct CycleIntegrals
 {
-    private const int PanelsOfPulse = 8;
-    private const int PanelsOfRest = 5;
+    private const int PanelsOfPulse = 5;
+    private const int PanelsOfRest = 3;
 
     public double Bus, BusSquare, Load, Charge, ChargeSquare, CapacitorSquare, CapacitorCos, CapacitorSin, Source, LoadPower;
+
+    /// <summary>Square of the reverse voltage, mean of all diodes, V²s.</summary>
+    public double ReverseSquare;
 
     /// <summary>Times at which the sampled extremes lie.</summary>
     public double PeakAt, BusMaxAt, BusMinAt, ReverseAt, RestReverse;
@@ -15,25 +18,38 @@ internal struct CycleIntegrals
     /// <summary>Step between samples of the pulse, s.</summary>
     public double Step;
 
+    private static ReadOnlySpan<double> NodesOfPiece => [-0.7745966692414834, 0, 0.7745966692414834];
+
+    private static ReadOnlySpan<double> WeightsOfPiece => [0.5555555555555556, 0.8888888888888888, 0.5555555555555556];
+
     private static ReadOnlySpan<double> Nodes => [-0.906179845938664, -0.5384693101056831, 0, 0.5384693101056831, 0.906179845938664];
 
     private static ReadOnlySpan<double> Weights => [0.23692688505618908, 0.47862867049936647, 0.5688888888888889, 0.47862867049936647, 0.23692688505618908];
 
-    public static CycleIntegrals Of(in ChargingPath path, in PulseTrain train, in PulseView pulse, ReadOnlySpan<ChargingPiece> pieces, PulseFigure reverse)
+    public static CycleIntegrals Of(in ChargingPath path, in PulseTrain train, in PulseView pulse, ReadOnlySpan<ChargingPiece> pieces, PulseFigure reverse,
+        RectifierDetail detail)
     {
         var sums = new CycleIntegrals { _busMax = double.NegativeInfinity, _busMin = double.PositiveInfinity, _peak = -1, _reverse = double.NegativeInfinity };
         var panels = pieces.Length > 1 ? 1 : PanelsOfPulse;
-        foreach (var piece in pieces)
+        var nodes = pieces.Length > 1 ? NodesOfPiece : Nodes;
+        var weights = pieces.Length > 1 ? WeightsOfPiece : Weights;
+        for (var i = 0; i < pieces.Length; i++)
         {
+            ref readonly var piece = ref pieces[i];
             var width = (piece.End - piece.Start) / panels;
             for (var p = 0; p < panels; p++)
             {
-                sums.PulsePanel(path, pulse, piece.Start + p * width, width, reverse);
+                sums.PulsePanel(path, piece, piece.Start + p * width, width, nodes, weights, reverse, detail, pulse);
             }
         }
 
-        sums.Step = (pulse.End - pulse.Start) / (panels * pieces.Length);
-        sums.Sample(pulse.Start, pulse, reverse);
+        if (detail == RectifierDetail.All)
+        {
+            sums.Step = (pulse.End - pulse.Start) / (panels * pieces.Length);
+            pulse.At(pulse.Start, out var j, out var v);
+            sums.Sample(pulse.Start, pulse, reverse, j, v);
+        }
+
         var rest = new BlockedStretch(path, train.End, train.EndVoltage);
         var end = train.RunsOn ? train.End : train.NextStart + path.Cycle;
         var restWidth = (end - train.End) / PanelsOfRest;
@@ -45,14 +61,21 @@ internal struct CycleIntegrals
         return sums;
     }
 
-    private void PulsePanel(in ChargingPath path, in PulseView pulse, double start, double width, PulseFigure reverse)
+    private void PulsePanel(
+        in ChargingPath path, in ChargingPiece piece, double start, double width, ReadOnlySpan<double> nodes, ReadOnlySpan<double> weights,
+        PulseFigure reverse, RectifierDetail detail, in PulseView pulse)
     {
-        for (var n = 0; n < Nodes.Length; n++)
+        for (var n = 0; n < nodes.Length; n++)
         {
-            var t = start + width * (1 + Nodes[n]) / 2;
-            pulse.At(t, out var j, out var v);
-            Add(path, t, j, v, Weights[n] * width / 2);
-            Sample(t, pulse, reverse, j, v);
+            var t = start + width * (1 + nodes[n]) / 2;
+            piece.At(t, out var u, out var j);
+            var v = piece.Terminal(u, j);
+            var sine = Add(path, t, j, v, weights[n] * width / 2);
+            ReverseSquare += weights[n] * width / 2 * path.ReverseSquareInPulse(v, j, path.Peak * sine);
+            if (detail == RectifierDetail.All)
+            {
+                Sample(t, pulse, reverse, j, v);
+            }
         }
     }
 
@@ -62,16 +85,21 @@ internal struct CycleIntegrals
         {
             var t = start + width * (1 + Nodes[n]) / 2;
             var v = rest.Terminal(t, out _);
-            Add(path, t, 0, v, Weights[n] * width / 2);
-            RestReverse = Math.Max(RestReverse, v - path.Peak * Math.Sin(path.Omega * t));
+            var sine = Add(path, t, 0, v, Weights[n] * width / 2);
+            ReverseSquare += Weights[n] * width / 2 * path.ReverseSquareAtRest(v, path.Peak * sine);
+            RestReverse = Math.Max(RestReverse, v - path.Peak * sine);
         }
     }
 
-    private void Add(in ChargingPath path, double t, double j, double v, double weight)
+    /// <summary>Adds one point; returns the sine of the mains there.</summary>
+    private double Add(in ChargingPath path, double t, double j, double v, double weight)
     {
         var load = path.LoadCurrent(v);
         var capacitor = j - load;
-        var (sin, cos) = Math.SinCos(2 * Math.PI * t / path.Cycle);
+        var (sin, cos) = Math.SinCos(path.Omega * t);
+
+        // The ripple runs at the frequency of the pulses: the mains' own for a half wave, else twice that.
+        var (rippleSin, rippleCos) = path.PulsesPerPeriod == 1 ? (sin, cos) : (2 * sin * cos, 1 - 2 * sin * sin);
         Bus += weight * v;
         BusSquare += weight * v * v;
         Load += weight * load;
@@ -79,15 +107,10 @@ internal struct CycleIntegrals
         Charge += weight * j;
         ChargeSquare += weight * j * j;
         CapacitorSquare += weight * capacitor * capacitor;
-        CapacitorCos += weight * capacitor * cos;
-        CapacitorSin += weight * capacitor * sin;
-        Source += weight * j * path.Peak * Math.Sin(path.Omega * t);
-    }
-
-    private void Sample(double t, in PulseView pulse, PulseFigure reverse)
-    {
-        pulse.At(t, out var j, out var v);
-        Sample(t, pulse, reverse, j, v);
+        CapacitorCos += weight * capacitor * rippleCos;
+        CapacitorSin += weight * capacitor * rippleSin;
+        Source += weight * j * path.Peak * sin;
+        return sin;
     }
 
     private void Sample(double t, in PulseView pulse, PulseFigure reverse, double j, double v)
@@ -107,7 +130,7 @@ internal struct CycleIntegrals
             (_busMin, BusMinAt) = (v, t);
         }
 
-        if (pulse.Of(reverse, t) is var r && r > _reverse)
+        if (pulse.Of(reverse, t, j, v) is var r && r > _reverse)
         {
             (_reverse, ReverseAt) = (r, t);
         }

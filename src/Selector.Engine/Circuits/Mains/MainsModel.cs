@@ -26,6 +26,8 @@ internal sealed class MainsModel : ReservoirModel
     private readonly int _max;
     private readonly int _min;
     private readonly int _loss;
+    private readonly int _start;
+    private readonly int _slope;
     private readonly MainsStresses _stress;
 
     public MainsModel(RequirementValues r)
@@ -45,7 +47,9 @@ internal sealed class MainsModel : ReservoirModel
         _mean = Write(new(LinkNames.BusMean, Units.Volt, guess, [.. BusOn]));
         _max = Write(new(LinkNames.BusMax, Units.Volt, guess, [.. BusOn]));
         _min = Write(new(LinkNames.BusMin, Units.Volt, guess, [.. BusOn]));
-        _loss = Write(new(LinkNames.Loss(topology.Rectifier), Units.Watt, 0.5));
+        _loss = Write(new(LinkNames.Loss(topology.Rectifier), Units.Watt, 0.5, [.. MainsStresses.CurrentOn(topology)]));
+        _start = Write(new("rectifier.start", Units.Volt, 0) { Others = Push.None, IsHint = true });
+        _slope = Write(new("rectifier.slope", Units.One, 0) { Others = Push.None, IsHint = true });
         _stress = new MainsStresses(Stress, topology, _nominal, _nominalFrequency, BusOn);
         Axes =
         [
@@ -91,18 +95,22 @@ internal sealed class MainsModel : ReservoirModel
     public override SolveStatus Solve(ReadOnlySpan<double> inputs, Span<double> links, Span<double> stresses, in Budget budget)
     {
         var circuit = _in.Circuit(inputs, _topology, _nominal, CapacitanceAt(inputs), EsrAt(inputs), inputs[Power]);
-        var status = RectifierSolver.Solve(circuit, budget, out var s);
+        var status = RectifierSolver.Solve(
+            circuit, budget, new RectifierStart(links[_start], links[_slope]), stresses.IsEmpty ? RectifierDetail.Loop : RectifierDetail.All, out var s);
         if (status != SolveStatus.Solved)
         {
             return status;
         }
 
+        links[_start] = s.Next.Voltage;
+        links[_slope] = double.IsFinite(s.Next.Slope) ? s.Next.Slope : 0;
         links[_mean] = s.BusMean;
-        links[_max] = s.BusMax;
-        links[_min] = s.BusMin;
         links[_loss] = s.DiodeLoss * _topology.DiodesInPart;
         if (!stresses.IsEmpty)
         {
+            // No loop runs through the extremes of the bus: they are only asked for once the loops are closed.
+            links[_max] = s.BusMax;
+            links[_min] = s.BusMin;
             WriteReservoir(inputs, stresses, s.BusMax, s.CapacitorRms, _topology.PulsesPerCycle * circuit.Frequency);
             _stress.Write(inputs, stresses, _in, s);
         }
@@ -122,7 +130,7 @@ internal sealed class MainsModel : ReservoirModel
     }
 
     private static AxisSpec Around(string id, double nominal, double tolerance) =>
-        new(id, new(nominal * (1 - tolerance), nominal * (1 + tolerance)), nominal, v => QuantityWriter.Write(v, Units.Hertz)) { Probes = 0 };
+        new(id, new(nominal * (1 - tolerance), nominal * (1 + tolerance)), nominal, v => QuantityWriter.Write(v, Units.Hertz));
 
     private static string Plain(double value) => value.ToString("0.#", System.Globalization.CultureInfo.InvariantCulture);
 }

@@ -27,7 +27,7 @@ internal sealed class MainsStresses
         _nominal = nominal;
         _nominalFrequency = nominalFrequency;
         var d = topology.Rectifier;
-        _secondary = stress(new(T1, "secondary-current", "secondary current, rms", Units.Ampere, Side.Ceiling, new Bound.Rating(TransformerFamily.Current), "I = √( mean of i² ) of the solved pulses") { On = CurrentOn });
+        _secondary = stress(new(T1, "secondary-current", "secondary current, rms", Units.Ampere, Side.Ceiling, new Bound.Rating(TransformerFamily.Current), "I = √( mean of i² ) of the solved pulses") { On = CurrentOn(topology) });
         _primary = stress(new(T1, "primary-voltage", "nominal mains on the primary", Units.Volt, Side.Ceiling, new Bound.Limit(TransformerFamily.Primary), "V = nominal mains") { Others = Push.None });
         _frequency = stress(new(T1, "frequency", "nominal frequency, at least", Units.Hertz, Side.Floor, new Bound.Limit(TransformerFamily.FrequencyMin), "f = nominal mains frequency") { Others = Push.None });
         _halves = stress(new(T1, "halves", "secondary halves, at least", Units.One, Side.Floor, new Bound.Required(topology.Halves, MainsStage.FrontEnd), "as the front end needs")
@@ -37,14 +37,16 @@ internal sealed class MainsStresses
         });
         _reverse = stress(new(d, "reverse-voltage", "reverse voltage", Units.Volt, Side.Ceiling, new Bound.Rating(RectifierRatings.Reverse), topology.Arrangement == RectifierArrangement.Bridge
             ? "V = greatest voltage across a blocking diode of the bridge" : "V = secondary peak + bus") { On = busOn });
-        _average = stress(new(d, "average-current", topology.DiodesInPart > 1 ? "average current, as rated" : "average current", Units.Ampere, Side.Ceiling, new Bound.Rating(RectifierRatings.Average), "I = mean of the diode's pulses; twice that where the part is rated for its DC output") { On = CurrentOn });
-        _peak = stress(new(d, "repetitive-peak", "repetitive peak current", Units.Ampere, Side.Ceiling, new Bound.Rating(RectifierRatings.Peak), "I = top of the solved pulse") { On = CurrentOn });
+        _average = stress(new(d, "average-current", topology.DiodesInPart > 1 ? "average current, as rated" : "average current", Units.Ampere, Side.Ceiling, new Bound.Rating(RectifierRatings.Average), "I = mean of the diode's pulses; twice that where the part is rated for its DC output") { On = CurrentOn(topology) });
+        _peak = stress(new(d, "repetitive-peak", "repetitive peak current", Units.Ampere, Side.Ceiling, new Bound.Rating(RectifierRatings.Peak), "I = top of the solved pulse") { On = CurrentOn(topology) });
     }
 
-    private static ImmutableArray<Dependence> CurrentOn =>
+    /// <summary>Directions of the currents that the charging pulses bring.</summary>
+    public static ImmutableArray<Dependence> CurrentOn(FrontEndTopology topology) =>
     [
         .. Rises("more power needs more current", InputId.Link(LinkNames.RegulatorPower)),
         .. None("the rectifier sees only the mean power", InputId.Link(LinkNames.RegulatorRipple), InputId.Link(LinkNames.RegulatorFrequency)),
+        .. None("around the loop of loss and temperature, whose gain is below one", InputId.Link(LinkNames.Temperature(topology.Rectifier))),
         .. None("a weight of the reservoir's rating only", [.. FrequencyMultiplier.Keys.Select(k => InputId.Column("C1", k))]),
     ];
 

@@ -9,7 +9,7 @@ internal ref struct PulseTrain
     public const int MostPieces = 64;
 
     /// <summary>Pieces of a pulse under a constant power; each straightens the load about its own middle.</summary>
-    private const int PiecesOfPower = 10;
+    private const int PiecesOfPower = 12;
     private const int Probes = 24;
     private const int MostSteps = 60;
 
@@ -113,6 +113,7 @@ internal ref struct PulseTrain
         var (t, j) = (Start, 0.0);
         var step = Length / PiecesOfPower;
         var v = _path.TerminalAtRest(u);
+        var (swing, swingBefore) = (double.NaN, double.NaN);
         while (Count < MostPieces - 1)
         {
             if (!(v > _path.Collapsed))
@@ -120,13 +121,8 @@ internal ref struct PulseTrain
                 return false;
             }
 
-            var piece = new ChargingPiece(_path, LinearLoad.About(_path, v), t, t + step, u, j);
-            piece.At(t + step / 2, out var uMiddle, out var jMiddle);
+            var piece = Straightened(t, step, u, j, v, ref swing, swingBefore);
             piece.At(t + step, out var uEnd, out var jEnd);
-            var middle = piece.Terminal(uMiddle, jMiddle);
-            var swing = piece.Terminal(uEnd, jEnd) - v;
-            piece = new ChargingPiece(_path, LinearLoad.About(_path, middle, swing * swing / 12), t, t + step, u, j);
-            piece.At(t + step, out uEnd, out jEnd);
             if (!double.IsFinite(uEnd + jEnd))
             {
                 return false;
@@ -139,10 +135,30 @@ internal ref struct PulseTrain
 
             _pieces[Count++] = piece;
             (t, u, j) = (t + step, uEnd, jEnd);
-            v = piece.Terminal(u, j);
+            var end = piece.Terminal(u, j);
+            (swingBefore, swing, v) = (swing, end - v, end);
         }
 
         return false;
+    }
+
+    /// <summary>
+    /// A piece whose load is straightened about the middle of its own voltage: foretold from the two pieces before, or by a trial.
+    /// </summary>
+    private readonly ChargingPiece Straightened(double t, double step, double u, double j, double v, ref double swing, double swingBefore)
+    {
+        if (double.IsNaN(swingBefore))
+        {
+            var trial = new ChargingPiece(_path, LinearLoad.About(_path, v), t, t + step, u, j);
+            trial.At(t + step, out var uEnd, out var jEnd);
+            swing = trial.Terminal(uEnd, jEnd) - v;
+        }
+        else
+        {
+            swing += swing - swingBefore;
+        }
+
+        return new ChargingPiece(_path, LinearLoad.About(_path, v + swing / 2, swing * swing / 12), t, t + step, u, j);
     }
 
     /// <summary>Ends the pulse in a piece whose current is positive at low and negative at high.</summary>

@@ -49,6 +49,12 @@ internal readonly ref struct PulseView
     public double Of(PulseFigure figure, double t)
     {
         At(t, out var j, out var v);
+        return Of(figure, t, j, v);
+    }
+
+    /// <summary>The same where current and bus are known already.</summary>
+    public double Of(PulseFigure figure, double t, double j, double v)
+    {
         return figure switch
         {
             PulseFigure.Current => j,

@@ -41,6 +41,7 @@ public enum LoadKind
 /// <param name="Esr">Ohm; 0 to 1e6. Resistance in the charging path must not be nothing at all.</param>
 /// <param name="LoadKind">Meaning of <paramref name="Load"/>.</param>
 /// <param name="Load">A or W, 0 to 1e9; or ohm, 1e-6 to 1e12.</param>
+/// <param name="BlockingConductance">Of a blocking diode, S, 0 to 1e-3: only its loss is counted, its current is too small to matter.</param>
 public readonly record struct RectifierCase(
     RectifierArrangement Arrangement,
     double Frequency,
@@ -52,7 +53,8 @@ public readonly record struct RectifierCase(
     double Capacitance,
     double Esr,
     LoadKind LoadKind,
-    double Load)
+    double Load,
+    double BlockingConductance = 0)
 {
     internal int DiodesInPath => Arrangement == RectifierArrangement.Bridge ? 2 : 1;
 
@@ -60,6 +62,7 @@ public readonly record struct RectifierCase(
         Within(Frequency, 1e-3, 1e6) && Within(SecondaryRms, 1e-3, 1e6) && Within(WindingResistance, 0, 1e6)
         && Within(Leakage, 0, 1e3) && Within(DiodeThreshold, 0, 1e3) && Within(DiodeSlope, 0, 1e6)
         && Within(Capacitance, 1e-12, 1e3) && Within(Esr, 0, 1e6)
+        && Within(BlockingConductance, 0, 1e-3)
         && WindingResistance + DiodeSlope + Esr >= 1e-9
         && (LoadKind == LoadKind.Resistance ? Within(Load, 1e-6, 1e12) : Within(Load, 0, 1e9));
 

@@ -11,38 +11,34 @@ internal static class RectifierFigures
     {
         var bus = Math.Max(0, path.Peak - path.Drop);
         var reverse = arrangement == RectifierArrangement.Bridge ? Math.Min(path.Peak, bus + path.Drop / 2) : bus + path.Peak;
-        return new RectifierSolution { BusMean = bus, BusMax = bus, BusMin = bus, DiodeReversePeak = reverse, StartVoltage = bus };
+        return new RectifierSolution { BusMean = bus, BusMax = bus, BusMin = bus, DiodeReversePeak = reverse, Next = new(bus, double.NaN) };
     }
 
-    public static RectifierSolution Of(in RectifierCase c, in ChargingPath path, in PulseTrain train, ReadOnlySpan<ChargingPiece> all)
+    public static RectifierSolution Of(in RectifierCase c, in ChargingPath path, in PulseTrain train, ReadOnlySpan<ChargingPiece> all, RectifierDetail detail)
     {
         var pieces = all[..train.Count];
         var pulse = new PulseView(c, path, pieces);
         var figure = c.Arrangement == RectifierArrangement.Bridge ? PulseFigure.BridgeReverse
             : c.Arrangement == RectifierArrangement.CentreTap ? PulseFigure.CentreTapReverse : PulseFigure.Bus;
-        var sums = CycleIntegrals.Of(path, train, pulse, pieces, figure);
-        var s = new RectifierSolution { PulseStart = train.Start, PulseEnd = train.End, StartVoltage = train.NextVoltage };
-        Bus(ref s, path, pulse, sums);
-        Currents(ref s, c, path, pulse, sums);
-        pulse.Extreme(figure, sums.ReverseAt, sums.Step, 1, out var reverse);
-        s.DiodeReversePeak = c.Arrangement == RectifierArrangement.HalfWave ? HalfWaveReverse(path, train, sums) : reverse;
+        var sums = CycleIntegrals.Of(path, train, pulse, pieces, figure, detail);
+        var s = new RectifierSolution { PulseStart = train.Start, PulseEnd = train.End };
+        Means(ref s, c, path, sums);
         Powers(ref s, c, path, sums);
+        if (detail == RectifierDetail.All)
+        {
+            Extremes(ref s, c, pulse, sums);
+            pulse.Extreme(figure, sums.ReverseAt, sums.Step, 1, out var reverse);
+            s.DiodeReversePeak = c.Arrangement == RectifierArrangement.HalfWave ? HalfWaveReverse(path, train, sums) : reverse;
+        }
+
         return s;
     }
 
-    private static void Bus(ref RectifierSolution s, in ChargingPath path, in PulseView pulse, in CycleIntegrals sums)
+    private static void Means(ref RectifierSolution s, in RectifierCase c, in ChargingPath path, in CycleIntegrals sums)
     {
-        pulse.Extreme(PulseFigure.Bus, sums.BusMaxAt, sums.Step, 1, out s.BusMax);
-        pulse.Extreme(PulseFigure.Bus, sums.BusMinAt, sums.Step, -1, out s.BusMin);
         s.BusMean = sums.Bus / path.Cycle;
-        s.BusRipplePeakToPeak = s.BusMax - s.BusMin;
         s.BusRippleRms = Math.Sqrt(Math.Max(0, sums.BusSquare / path.Cycle - s.BusMean * s.BusMean));
         s.LoadMean = sums.Load / path.Cycle;
-    }
-
-    private static void Currents(ref RectifierSolution s, in RectifierCase c, in ChargingPath path, in PulseView pulse, in CycleIntegrals sums)
-    {
-        var peakAt = pulse.Extreme(PulseFigure.Current, sums.PeakAt, sums.Step, 1, out s.DiodePeak);
         var (mean, square) = (sums.Charge / path.Cycle, sums.ChargeSquare / path.Cycle);
 
         // In a bridge and at a centre tap each diode carries every other pulse.
@@ -52,6 +48,14 @@ internal static class RectifierFigures
         s.SecondaryRms = Math.Sqrt((c.Arrangement == RectifierArrangement.CentreTap ? 0.5 : 1) * square);
         s.CapacitorRms = Math.Sqrt(sums.CapacitorSquare / path.Cycle);
         s.CapacitorFundamentalRms = Math.Sqrt(2 * (sums.CapacitorCos * sums.CapacitorCos + sums.CapacitorSin * sums.CapacitorSin)) / path.Cycle;
+    }
+
+    private static void Extremes(ref RectifierSolution s, in RectifierCase c, in PulseView pulse, in CycleIntegrals sums)
+    {
+        pulse.Extreme(PulseFigure.Bus, sums.BusMaxAt, sums.Step, 1, out s.BusMax);
+        pulse.Extreme(PulseFigure.Bus, sums.BusMinAt, sums.Step, -1, out s.BusMin);
+        s.BusRipplePeakToPeak = s.BusMax - s.BusMin;
+        var peakAt = pulse.Extreme(PulseFigure.Current, sums.PeakAt, sums.Step, 1, out s.DiodePeak);
         var level = CountedShare * s.DiodePeak;
         var counted = pulse.Crossing(level, pulse.End, peakAt) - pulse.Crossing(level, pulse.Start, peakAt);
         s.ConductionFraction = counted * 2 * c.Frequency;
@@ -65,7 +69,8 @@ internal static class RectifierFigures
         s.PowerFactor = s.SourceApparent > 0 ? s.SourcePower / s.SourceApparent : 0;
         s.LoadPower = sums.LoadPower / path.Cycle;
         s.WindingLoss = windings * c.WindingResistance * s.SecondaryRms * s.SecondaryRms;
-        s.DiodeLoss = c.DiodeThreshold * s.DiodeAverage + c.DiodeSlope * s.DiodeRms * s.DiodeRms;
+        s.DiodeLoss = c.DiodeThreshold * s.DiodeAverage + c.DiodeSlope * s.DiodeRms * s.DiodeRms
+            + c.BlockingConductance * sums.ReverseSquare / path.Cycle;
         s.EsrLoss = c.Esr * s.CapacitorRms * s.CapacitorRms;
     }
 

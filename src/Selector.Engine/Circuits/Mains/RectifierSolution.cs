@@ -1,5 +1,20 @@
 namespace Selector.Engine.Circuits.Mains;
 
+/// <summary>What is asked of a solution.</summary>
+public enum RectifierDetail
+{
+    /// <summary>Means, RMS values and powers: what other stages need while loops are being closed. The rest stays 0.</summary>
+    Loop,
+
+    /// <summary>Everything.</summary>
+    All,
+}
+
+/// <summary>The start of a search, taken from a neighbouring solution; NaN where there is none.</summary>
+/// <param name="Voltage">On the ideal capacitor at the start of a pulse, V.</param>
+/// <param name="Slope">Of the map's error there.</param>
+public readonly record struct RectifierStart(double Voltage, double Slope);
+
 /// <summary>
 /// Periodic steady state of a rectifier, SI units. Means and RMS values are over one line period; RMS includes DC; the bus is
 /// taken at the terminals of the reservoir, ESR included.
@@ -36,11 +51,11 @@ public struct RectifierSolution
     /// <summary>Start and end of the pulse after the zero crossing of its own half-wave, s; equal when none flows.</summary>
     public double PulseStart, PulseEnd;
 
-    /// <summary>Voltage on the ideal capacitor at the start of the pulse, V: the start for a neighbouring case.</summary>
-    public double StartVoltage;
+    /// <summary>Where the search for a neighbouring case begins.</summary>
+    public RectifierStart Next;
 
     internal readonly bool IsFinite => double.IsFinite(
         BusMean + BusMax + BusMin + BusRippleRms + LoadMean + DiodePeak + DiodeAverage + DiodeRms + DiodeReversePeak + SecondaryRms
         + CapacitorRms + CapacitorFundamentalRms + ConductionFraction + SourcePower + SourceApparent + LoadPower + WindingLoss
-        + DiodeLoss + EsrLoss + PulseStart + PulseEnd + StartVoltage);
+        + DiodeLoss + EsrLoss + PulseStart + PulseEnd);
 }

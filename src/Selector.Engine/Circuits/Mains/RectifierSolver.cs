@@ -17,8 +17,12 @@ public static class RectifierSolver
     /// <param name="c">The case.</param>
     /// <param name="budget">Bound on cycles of the secant, and the caller's wish.</param>
     /// <param name="solution">Finite when solved.</param>
-    /// <param name="startVoltage">Capacitor voltage at the start of a pulse of a neighbouring case; NaN for none. Saves work only.</param>
-    public static SolveStatus Solve(in RectifierCase c, in Budget budget, out RectifierSolution solution, double startVoltage = double.NaN)
+    public static SolveStatus Solve(in RectifierCase c, in Budget budget, out RectifierSolution solution) =>
+        Solve(c, budget, new RectifierStart(double.NaN, double.NaN), RectifierDetail.All, out solution);
+
+    /// <summary>The same, from a neighbouring solution and in the detail that is needed; both save work and change nothing else.</summary>
+    public static SolveStatus Solve(
+        in RectifierCase c, in Budget budget, in RectifierStart from, RectifierDetail detail, out RectifierSolution solution)
     {
         solution = default;
         if (!c.IsInRange)
@@ -41,7 +45,8 @@ public static class RectifierSolver
 
         Span<ChargingPiece> pieces = stackalloc ChargingPiece[PulseTrain.MostPieces];
         var train = new PulseTrain(path, pieces);
-        var status = Find(ref train, path, startVoltage > 0 && startVoltage < top ? startVoltage : ChargedStart * top, top, budget);
+        var start = from.Voltage > 0 && from.Voltage < top ? from : new RectifierStart(ChargedStart * top, double.NaN);
+        var status = Find(ref train, path, start, top, budget, out var slope);
         if (status != SolveStatus.Solved)
         {
             return status;
@@ -52,15 +57,18 @@ public static class RectifierSolver
             return SolveStatus.BadInput;
         }
 
-        solution = RectifierFigures.Of(c, path, train, pieces);
-        return solution.IsFinite && !(c.LoadKind == LoadKind.Power && solution.BusMin <= path.Collapsed)
+        solution = RectifierFigures.Of(c, path, train, pieces, detail);
+        solution.Next = new RectifierStart(train.NextVoltage, slope);
+        return solution.IsFinite && !(detail == RectifierDetail.All && c.LoadKind == LoadKind.Power && solution.BusMin <= path.Collapsed)
             ? SolveStatus.Solved
             : SolveStatus.NoOperatingPoint;
     }
 
-    private static SolveStatus Find(ref PulseTrain train, in ChargingPath path, double start, double top, in Budget budget)
+    private static SolveStatus Find(
+        ref PulseTrain train, in ChargingPath path, in RectifierStart start, double top, in Budget budget, out double slope)
     {
-        var (x, before, errorBefore) = (start, double.NaN, double.NaN);
+        var (x, before, errorBefore) = (start.Voltage, double.NaN, double.NaN);
+        slope = start.Slope;
         for (var i = 0; i < budget.Iterations; i++)
         {
             if (budget.Cancel.IsCancellationRequested)
@@ -85,7 +93,7 @@ public static class RectifierSolver
             }
 
             // The map is concave: a secant from above the fixed point cannot fall below it. Anything else goes one plain cycle on.
-            var slope = (error - errorBefore) / (x - before);
+            slope = double.IsNaN(before) ? slope : (error - errorBefore) / (x - before);
             var next = slope < -1e-9 ? x - error / slope : train.NextVoltage;
             (before, errorBefore) = (x, error);
             x = next > 0.3 * x && next < top ? next : train.NextVoltage;

@@ -22,7 +22,7 @@ public static class ReservoirCapacitor
     /// <summary>Capacitance from aged and low to new and high; ESR from new to aged.</summary>
     public static ImmutableArray<AxisSpec> Axes(string position) =>
     [
-        new(CapacitanceAxis(position), new(0, 1), 0.5, v => v <= 0 ? $"{position} low and aged" : v >= 1 ? $"{position} high and new" : "") { Probes = 0 },
+        new(CapacitanceAxis(position), new(0, 1), 0.5, v => v <= 0 ? $"{position} low and aged" : v >= 1 ? $"{position} high and new" : ""),
         new(EsrAxis(position), new(0, 1), 0.5, v => v <= 0 ? $"{position} ESR low" : v >= 1 ? $"{position} ESR aged" : "") { Probes = 0 },
     ];
 
