@@ -21,7 +21,14 @@ public sealed record Report(string Title, Cover Cover, ImmutableArray<Section> S
 /// <param name="Facts">Issue, dates, policy, engine: what the sheet rests on.</param>
 /// <param name="Signatures">Who drew, checked and approved; blank values leave a line to sign on.</param>
 public sealed record Cover(
-    string Number, string Name, string Issue, ImmutableArray<Fact> Facts, ImmutableArray<Fact> Signatures);
+    string Number, string Name, string Issue, ImmutableArray<Fact> Facts, ImmutableArray<Fact> Signatures)
+{
+    /// <summary>In words on every sheet: "issue B", "not issued".</summary>
+    public string Standing => Issue.StartsWith("not", StringComparison.Ordinal) ? Issue : $"issue {Issue}";
+
+    /// <summary>What the finding rests on, in words on every sheet.</summary>
+    public ImmutableArray<string> Rests { get; init; } = [];
+}
 
 /// <summary>A labelled value.</summary>
 /// <param name="Label">Above it.</param>

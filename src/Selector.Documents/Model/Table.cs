@@ -29,7 +29,11 @@ public enum Align
 /// <param name="Width">Share of the width, relative to the other columns.</param>
 /// <param name="Align">Numbers stand right.</param>
 /// <param name="NoteKey">Heading in files for the small print of its cells; empty when they have none.</param>
-public sealed record Column(string Key, string Head, double Width, Align Align = Align.Left, string NoteKey = "");
+public sealed record Column(string Key, string Head, double Width, Align Align = Align.Left, string NoteKey = "")
+{
+    /// <summary>Holds drawings of what the columns beside it say; files leave it out.</summary>
+    public bool IsDrawn { get; init; }
+}
 
 /// <summary>A row.</summary>
 /// <param name="Cells">One per column.</param>
@@ -39,6 +43,6 @@ public sealed record Row(ImmutableArray<Cell> Cells, bool StartsGroup = false)
     /// <summary>Cells printed instead where the row is the first on a sheet, so that a position which runs over is named again; empty for the same.</summary>
     public ImmutableArray<Cell> AtTop { get; init; } = [];
 
-    /// <summary>A sum: heavy rule above, weight in the text.</summary>
+    /// <summary>A sum: its numbers are set in weight.</summary>
     public bool IsTotal { get; init; }
 }

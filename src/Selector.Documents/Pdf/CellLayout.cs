@@ -22,7 +22,7 @@ internal sealed class CellLayout
         _faces = faces;
         _align = align;
         _width = width;
-        _face = strong || cell is TextCell { Strong: true } or VerdictCell { Tone: Tone.Lacks } ? faces.Strong : faces.Text;
+        _face = (strong && cell is NumberCell) || cell is TextCell { Strong: true } or VerdictCell { Tone: Tone.Lacks } ? faces.Strong : faces.Text;
         _lines = Wrap.Lines(cell.Text, _face, width - Indent, MostLines);
         _note = Wrap.Lines(cell.Note, faces.Small, width, MostLines);
     }

@@ -29,9 +29,9 @@ internal static class Foot
         var right = form.Right - Pad - strong.Width(number);
         Line(number, strong, right, middle);
 
-        string[] rest = [report.Title, $"{cover.Number}: {cover.Name}", cover.Issue.StartsWith("not", StringComparison.Ordinal) ? cover.Issue : $"issue {cover.Issue}", .. cover.Facts.Skip(2).Take(2).Select(f => $"{f.Label} {f.Value}")];
-        var identity = string.Join("  \u00b7  ", rest);
-        Line(Wrap.Lines(identity, small, right - form.Left - 3 * Pad)[0], small, form.Left + Pad, middle);
+        // The name comes last: it is the only part that may be too long, and the others tell the sheet apart without it.
+        string[] parts = [report.Title, cover.Number, cover.Standing, .. cover.Rests, cover.Name];
+        Line(Wrap.OneLine(string.Join("  \u00b7  ", parts), small, right - form.Left - 3 * Pad), small, form.Left + Pad, middle);
 
         void Line(string text, Face face, double x, double top)
         {

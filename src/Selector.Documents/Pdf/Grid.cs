@@ -12,6 +12,12 @@ internal static class Grid
 
     public static void Draw(Flow flow, FactGrid grid)
     {
+        if (grid.Facts.IsEmpty)
+        {
+            flow.Draw("None.", flow.Faces.Small, flow.Ink.Quiet, flow.Form.Left + Pad, flow.Y);
+            flow.Y += flow.Faces.Small.Line + 4;
+        }
+
         var width = flow.Form.Inner / FactColumns;
         foreach (var row in grid.Facts.Chunk(FactColumns))
         {
@@ -22,10 +28,7 @@ internal static class Grid
             {
                 var x = flow.Form.Left + i * width;
                 cells[i].Draw(flow, x + Pad, flow.Y + 3, width - 2 * Pad);
-                if (i > 0)
-                {
-                    flow.Graphics.DrawLine(flow.Ink.Hairline, x, flow.Y, x, flow.Y + height);
-                }
+                flow.Graphics.DrawLine(flow.Ink.Hairline, x + width, flow.Y, x + width, flow.Y + height);
             }
 
             flow.Y += height;
@@ -35,6 +38,7 @@ internal static class Grid
         flow.Rule(flow.Ink.Rule);
     }
 
+    /// <summary>A bar at its left that no other block has: warnings are found without reading.</summary>
     public static void Draw(Flow flow, Caution caution)
     {
         const double Bar = 3;
@@ -69,7 +73,7 @@ internal static class Grid
     {
         private readonly ImmutableArray<string> _label = Wrap.Lines(fact.Label, faces.Small, width);
         private readonly ImmutableArray<string> _value = Wrap.Lines(fact.Value.Length == 0 ? "\u2013" : fact.Value, faces.Text, width - 4);
-        private readonly ImmutableArray<string> _note = Wrap.Lines(fact.Fault.Length > 0 ? fact.Fault : fact.Note, faces.Small, width);
+        private readonly ImmutableArray<string> _note = Wrap.Lines(fact.Fault.Length > 0 ? fact.Fault : fact.Note, fact.Fault.Length > 0 ? faces.SmallStrong : faces.Small, width);
 
         public double Height => _label.Length * faces.Small.Line + ValueHeight + 1 + _note.Length * faces.Small.Line;
 

@@ -16,7 +16,7 @@ internal static class Head
         var faces = flow.Faces;
         var top = flow.Y;
         var split = form.Left + form.Inner * NameShare;
-        var name = Wrap.Lines(cover.Name.Length == 0 ? "unnamed" : cover.Name, faces.Name, split - form.Left - 2 * Pad, 3);
+        var name = Wrap.Lines(cover.Name, faces.Name, split - form.Left - 2 * Pad, 3);
         var factWidth = (form.Right - split) / cover.Facts.Length;
         var facts = cover.Facts.Select(f => (
             Fact: f,
@@ -58,7 +58,7 @@ internal static class Head
             flow.Graphics.DrawLine(flow.Ink.Hairline, x, top, x, top + SignHeight);
             flow.Draw(who.Label, flow.Faces.Small, flow.Ink.Quiet, x + Pad, top + 3);
             flow.DrawRight("signed, date", flow.Faces.Small, flow.Ink.Quiet, x + width - Pad, top + 3);
-            flow.Draw(who.Value, flow.Faces.Text, flow.Ink.Plain, x + Pad, top + SignHeight - 17);
+            flow.Draw(Wrap.OneLine(who.Value, flow.Faces.Text, width - 2 * Pad), flow.Faces.Text, flow.Ink.Plain, x + Pad, top + SignHeight - 17);
             flow.Graphics.DrawLine(flow.Ink.Rule, x + Pad, top + SignHeight - 6, x + width - Pad, top + SignHeight - 6);
             x += width;
         }

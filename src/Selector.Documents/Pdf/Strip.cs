@@ -5,7 +5,8 @@ namespace Selector.Documents.Pdf;
 /// <summary>The strip of counts: numbers large, words beside them, and the sentence beneath.</summary>
 internal static class Strip
 {
-    private const double Pad = 8;
+    private const double Pad = 5;
+    private const double After = 11;
     private const double Height = 21;
 
     public static void Draw(Flow flow, CountStrip strip)
@@ -16,7 +17,7 @@ internal static class Strip
         foreach (var item in strip.Items)
         {
             var mark = item.Mark == Mark.None ? 0 : Marks.Width;
-            var width = Pad + mark + faces.Count.Width(item.Value) + 4 + faces.Text.Width(item.Words) + Pad;
+            var width = Pad + mark + faces.Count.Width(item.Value) + 4 + faces.Text.Width(item.Words) + After;
             if (x + width > flow.Form.Right)
             {
                 flow.Y += Height;

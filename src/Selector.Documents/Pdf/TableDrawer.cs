@@ -7,7 +7,11 @@ namespace Selector.Documents.Pdf;
 internal sealed class TableDrawer
 {
     private const double Pad = 3.2;
+    private const double Indent = 1.8;
     private const double RowPad = 2.2;
+
+    /// <summary>A table does not begin with less than this many rows at the foot of a sheet.</summary>
+    private const int Together = 2;
     private readonly Flow _flow;
     private readonly Table _table;
     private readonly ImmutableArray<(double Left, double Width)> _places;
@@ -17,8 +21,8 @@ internal sealed class TableDrawer
     {
         _flow = flow;
         _table = table;
-        var unit = flow.Form.Inner / table.Columns.Sum(c => c.Width);
-        var x = flow.Form.Left;
+        var unit = (flow.Form.Inner - 2 * Indent) / table.Columns.Sum(c => c.Width);
+        var x = flow.Form.Left + Indent;
         var places = ImmutableArray.CreateBuilder<(double, double)>();
         foreach (var column in table.Columns)
         {
@@ -38,7 +42,7 @@ internal sealed class TableDrawer
 
     private void Draw()
     {
-        var first = _table.Rows.IsEmpty ? 14 : Layout(_table.Rows[0].Cells, _table.Rows[0]).Height;
+        var first = _table.Rows.IsEmpty ? 14 : _table.Rows.Take(Together).Sum(r => Layout(r.Cells, r).Height);
         _flow.Need(CaptionHeight + HeadHeight + first + 4);
         Head("");
         for (var i = 0; i < _table.Rows.Length; i++)
@@ -68,7 +72,7 @@ internal sealed class TableDrawer
         }
         else if (index > 0)
         {
-            _flow.Rule(row.IsTotal || row.StartsGroup ? _flow.Ink.Rule : _flow.Ink.Hairline);
+            _flow.Rule(row.StartsGroup ? _flow.Ink.Rule : _flow.Ink.Hairline);
         }
 
         for (var i = 0; i < cells.Length; i++)

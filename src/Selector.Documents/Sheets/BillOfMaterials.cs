@@ -19,7 +19,7 @@ public static class BillOfMaterials
             new("", [Common.Counts(input.Ledger), .. Fault(input), Order(input, build, lines)]),
             new("Requirement, as typed and as understood", [Common.Requirement(input.Requirement)]),
             new("", [Cautions.For(input.Ledger)]),
-            new("", [BomTable.Of(input.Ledger, build, lines), new Paragraph(Rule)]),
+            new("", [new Paragraph(Rule), BomTable.Of(input.Ledger, build, lines)]),
             new("", [OrderTable.Of(lines)]),
         ]);
     }

@@ -99,16 +99,17 @@ internal static class BomTable
     {
         var without = PriceCells.Without(lines);
         var description = without.Length == 0 ? how : $"{how}; {without}";
-        return sums.Select(s => new Row(
+        return sums.Select((s, i) => new Row(
         [
             Cell.Empty, Cell.Empty,
             new TextCell(what) { Strong = true },
-            Cell.Empty,
-            new TextCell(description),
-            Cell.Empty, Cell.Empty, Cell.Empty, Cell.Empty, Cell.Empty,
+            Cell.Empty, Cell.Empty,
+            new TextCell(i == 0 ? description : "", Tone.Quiet),
+            Cell.Empty, Cell.Empty, Cell.Empty, Cell.Empty,
             new NumberCell(Money.Write(s.Sum, s.Currency)),
             Cell.Empty,
-        ]) { IsTotal = true });
+        ],
+        StartsGroup: i == 0) { IsTotal = true });
     }
 
     private static NumberCell Whole(int number) => new(number.ToString(CultureInfo.InvariantCulture));

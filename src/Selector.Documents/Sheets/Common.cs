@@ -10,7 +10,7 @@ internal static class Common
 {
     public static Cover Cover(PaperInput input) => new(
         string.Create(CultureInfo.InvariantCulture, $"Supply {input.SupplyNumber:0000}"),
-        input.SupplyName,
+        string.IsNullOrWhiteSpace(input.SupplyName) ? "unnamed" : input.SupplyName.Trim(),
         input.Issue,
         [
             new("Issue", input.Issue),
@@ -19,7 +19,10 @@ internal static class Common
             new("Engine version", input.Engine),
             .. input.Shop.Length == 0 ? [] : new Fact[] { new("Shop", input.Shop) },
         ],
-        [new("Drawn", input.Drawn), new("Checked", input.Checked), new("Approved", input.Approved)]);
+        [new("Drawn", input.Drawn), new("Checked", input.Checked), new("Approved", input.Approved)])
+    {
+        Rests = [$"policy {input.Ledger.Policy}", $"engine {input.Engine}"],
+    };
 
     /// <summary>Counts before anything else; a zero is shown too, so that nobody wonders whether it was counted.</summary>
     public static CountStrip Counts(Ledger ledger)

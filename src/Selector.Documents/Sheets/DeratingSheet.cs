@@ -26,6 +26,7 @@ public static class DeratingSheet
     private const string Reading =
         "Value is the stress at the worst corner named; allowed is what the clause leaves of the rating there. Margin is 1 \u2212 value/allowed; " +
         "for a value that must reach a least figure 1 \u2212 required/value; for a temperature the share of the rise from ambient that is left, with the kelvins beneath. " +
+        "A rating is taken as printed unless \"at temperature\" stands under it; then the clause works on what the maker's own curve leaves there. " +
         "The scale runs from zero to the rating: the tick stands at allowed, the hatched part is what the policy takes away, the pointer stands at the value. " +
         "Where a value must reach a least figure, the tick is that figure and the pointer must stand right of it. " +
         "What has no finding does not pass.";

@@ -25,7 +25,7 @@ public static class Money
 
     /// <summary>With its currency: "27.34 EUR"; the space does not break.</summary>
     public static string Write(long tenThousandths, string currency) =>
-        currency.Length == 0 ? Write(tenThousandths) : $"{Write(tenThousandths)}\u202f{currency}";
+        currency.Length == 0 ? Write(tenThousandths) : $"{Write(tenThousandths)}\u00a0{currency}";
 
     /// <summary>Sums by currency, in the order of the codes; sums in different currencies are never added.</summary>
     public static IReadOnlyList<(string Currency, long Sum)> Sums(IEnumerable<(string Currency, long Amount)> amounts) =>

@@ -44,14 +44,15 @@ internal static class OrderTable
         PriceCells.Date(line),
     ]);
 
-    private static IEnumerable<Row> Totals(ImmutableArray<OrderLine> lines) => PriceCells.Extended(lines).Select(sum => new Row(
+    private static IEnumerable<Row> Totals(ImmutableArray<OrderLine> lines) => PriceCells.Extended(lines).Select((sum, i) => new Row(
     [
         Cell.Empty,
         new TextCell("Order total") { Strong = true, Note = PriceCells.Without(lines) },
         Cell.Empty, Cell.Empty, Cell.Empty, Cell.Empty, Cell.Empty, Cell.Empty, Cell.Empty,
         new NumberCell(Money.Write(sum.Sum, sum.Currency)),
         Cell.Empty,
-    ]) { IsTotal = true });
+    ],
+    StartsGroup: i == 0) { IsTotal = true });
 
     private static NumberCell Whole(int number) => new(number.ToString(CultureInfo.InvariantCulture));
 }

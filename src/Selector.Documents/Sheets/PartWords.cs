@@ -38,7 +38,7 @@ internal static class PartWords
     /// rating the one that asks for most.
     /// </summary>
     public static IEnumerable<string> LeastRatings(LedgerPosition position) => position.Rows
-        .Where(r => r.LeastRating is not null && r.Spec is not null)
+        .Where(r => r.LeastRating > 0 && r.Spec is not null)
         .GroupBy(RatingKey, StringComparer.Ordinal)
         .Select(g => g.MaxBy(r => r.LeastRating)!)
         .Select(r => $"{r.Name} \u2265\u202f{QuantityWriter.Write(r.LeastRating!.Value, r.Spec!.Unit)}");
