@@ -13,7 +13,12 @@ public static class Server
     public static WebApplication Build(string[] args)
     {
         // The folder of the program, not the one it is started from: settings and pages lie beside the program.
-        var builder = WebApplication.CreateBuilder(new WebApplicationOptions { Args = args, ContentRootPath = AppContext.BaseDirectory });
+        var builder = WebApplication.CreateBuilder(new WebApplicationOptions
+        {
+            Args = args,
+            ApplicationName = typeof(Server).Assembly.GetName().Name,
+            ContentRootPath = AppContext.BaseDirectory,
+        });
 
         // Without it, files of the framework are only found in the Development environment or when published.
         builder.WebHost.UseStaticWebAssets();

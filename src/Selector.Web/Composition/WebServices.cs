@@ -14,8 +14,11 @@ internal static class WebServices
             o.Providers.Add<BrotliCompressionProvider>();
             o.Providers.Add<GzipCompressionProvider>();
         });
-        services.AddSingleton<SheetWork>();
-        services.AddSingleton<PaperMaker>();
-        return services;
+        return services.AddSheets();
     }
+
+    /// <summary>What a sheet and its papers need; also all that a component test registers.</summary>
+    public static IServiceCollection AddSheets(this IServiceCollection services) => services
+        .AddSingleton<SheetWork>()
+        .AddSingleton<PaperMaker>();
 }

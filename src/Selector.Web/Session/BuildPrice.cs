@@ -16,7 +16,7 @@ public sealed record BuildPrice(string Sum, int Units, string Without)
         var sums = Money.Sums(lines.Where(l => l.OneSupply is not null).Select(l => (l.Currency, l.OneSupply!.Value)));
         var unknown = lines.Count(l => l.OneSupply is null);
         return new BuildPrice(
-            sums.Count == 0 ? "no price" : Money.Words(sums),
+            sums.Count == 0 ? "\u2013" : Money.Words(sums),
             build.Units,
             unknown == 0 ? "" : $", {unknown} without price");
     }
