@@ -65,19 +65,18 @@ public sealed class MigrationTests : IDisposable
     public async Task A_lock_that_a_killed_starter_left_behind_does_not_stop_the_next_one()
     {
         // What dotnet/efcore #38958 describes: the row of the framework's own lock outlives the process that wrote it.
-        var store = await _temp.Migrated();
-        await using (var context = await store.Open(default))
-        {
-            await context.Database.ExecuteSqlRawAsync(
-                """
-                CREATE TABLE IF NOT EXISTS "__EFMigrationsLock" ("Id" INTEGER NOT NULL CONSTRAINT "PK___EFMigrationsLock" PRIMARY KEY, "Timestamp" TEXT NOT NULL);
-                INSERT OR REPLACE INTO "__EFMigrationsLock"("Id", "Timestamp") VALUES(1, '2020-01-01 00:00:00+00:00');
-                DELETE FROM "__EFMigrationsHistory" WHERE 0;
-                """);
-        }
+        Directory.CreateDirectory(Path.GetDirectoryName(_temp.File)!);
+        var store = _temp.Starter().GetRequiredService<StoreWork>();
+        await using var context = await store.Open(default);
+        await context.Database.ExecuteSqlRawAsync(
+            """
+            CREATE TABLE "__EFMigrationsLock" ("Id" INTEGER NOT NULL CONSTRAINT "PK___EFMigrationsLock" PRIMARY KEY, "Timestamp" TEXT NOT NULL);
+            INSERT INTO "__EFMigrationsLock"("Id", "Timestamp") VALUES(1, '2020-01-01 00:00:00+00:00');
+            """);
 
         using var patience = new CancellationTokenSource(TimeSpan.FromSeconds(30));
         await _temp.Starter().GetRequiredService<IStoreMigrator>().Migrate(patience.Token);
+        Assert.Empty(await context.Database.GetPendingMigrationsAsync());
     }
 
     [Fact]

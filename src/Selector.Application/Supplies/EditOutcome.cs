@@ -21,8 +21,8 @@ public abstract record EditOutcome
     {
         /// <summary>In a sentence, for page and terminal.</summary>
         public string Words => By.Length == 0
-            ? $"Not changed: it reads \u201c{Stands}\u201d now."
-            : $"Not changed: {By} wrote \u201c{Stands}\u201d in the meantime.";
+            ? $"Not changed: it reads \u201c{PlainText.Short(Stands)}\u201d now."
+            : $"Not changed: {By} wrote \u201c{PlainText.Short(Stands)}\u201d in the meantime.";
     }
 
     /// <summary>There is no such supply.</summary>

@@ -75,8 +75,8 @@ public sealed class SupplyDesk(StoreWork store, Registry registry, SupplyNotices
     }
 
     private async Task<EditOutcome> TakeBack(int number, string by, bool redo, CancellationToken cancel) =>
-        by.Length is 0 or > Limits.Name
-            ? new EditOutcome.Refused($"The name of who edits must have 1 to {Limits.Name} characters.")
+        SupplyFields.RefusalOf(by) is { } refusal
+            ? new EditOutcome.Refused(refusal)
             : await Write(editor => editor.TakeBack(number, by, redo), cancel).ConfigureAwait(false);
 
     private async Task<EditOutcome> Write(Func<SupplyEditor, Task<EditOutcome>> work, CancellationToken cancel)

@@ -36,12 +36,12 @@ public static class SupplyFields
             return $"The text is {text.Length} characters long; at most {Limits.Text} are kept. Shorten it.";
         }
 
-        if (by.Length is 0 or > Limits.Name)
+        if (RefusalOf(by) is { } nobody)
         {
-            return $"The name of who edits must have 1 to {Limits.Name} characters.";
+            return nobody;
         }
 
-        if (!PlainText.IsKept(text) || !PlainText.IsKept(by))
+        if (!PlainText.IsKept(text))
         {
             return "The text has characters that cannot be stored. Type it again without them.";
         }
@@ -58,6 +58,11 @@ public static class SupplyFields
             || registry.Fields.Any(f => f.Key == field);
         return known ? null : $"There is no field \u201c{PlainText.Short(field)}\u201d.";
     }
+
+    /// <summary>Why somebody may not be named in the log; null when they may.</summary>
+    public static string? RefusalOf(string by) => by.Length is >= 1 and <= Limits.Name && PlainText.IsKept(by)
+        ? null
+        : $"The name of who edits must have 1 to {Limits.Name} characters, all of which can be stored.";
 
     private static bool IsPositionSign(char c) => char.IsAsciiLetterOrDigit(c) || c is '-' or '_' or '.';
 }

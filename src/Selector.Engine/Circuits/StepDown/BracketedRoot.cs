@@ -22,6 +22,7 @@ internal static class BracketedRoot
     {
         x = guess > low && guess < high ? guess : low + (high - low) / 2;
         double lastX = double.NaN, lastValue = double.NaN, lastStep = double.PositiveInfinity;
+        var width = high - low;
         for (var i = 0; i < budget.Iterations; i++)
         {
             if (budget.Cancel.IsCancellationRequested)
@@ -30,7 +31,7 @@ internal static class BracketedRoot
             }
 
             var value = f.At(x, out var slope);
-            if (Math.Abs(value) <= valueTolerance || Math.Abs(lastStep) <= stepTolerance)
+            if (Math.Abs(value) <= valueTolerance || Math.Abs(lastStep) <= stepTolerance || high - low <= stepTolerance)
             {
                 return SolveStatus.Solved;
             }
@@ -55,8 +56,16 @@ internal static class BracketedRoot
             }
 
             var next = x - value / slope;
+            // Newton creeps where rounding hides the slope: from the sixth step on, each third must have halved the bracket.
+            var creeps = false;
+            if (i >= 6 && i % 3 == 0)
+            {
+                creeps = high - low > width / 2;
+                width = high - low;
+            }
+
             // Bisect when the step leaves the bracket or the steps no longer shrink.
-            if (!(next > low && next < high) || Math.Abs(next - x) > Math.Abs(lastStep))
+            if (creeps || !(next > low && next < high) || Math.Abs(next - x) > Math.Abs(lastStep))
             {
                 next = low + (high - low) / 2;
             }

@@ -6,7 +6,7 @@ namespace Selector.Engine.Circuits.StepDown;
 /// <paramref name="DiodeSlope"/> from ground to the switch node; coil with winding resistance; output capacitor with ESR and
 /// ESL; load. Switching losses are not part of the circuit: see <see cref="SwitchingLoss"/>.
 /// </summary>
-/// <param name="Frequency">Switching frequency, Hz; 1 to 1e8.</param>
+/// <param name="Frequency">Switching frequency, Hz; 100 to 1e8.</param>
 /// <param name="InputVoltage">V; 1e-3 to 1e5.</param>
 /// <param name="Duty">Share of the period for which the switch is on; above 0, at most 1.</param>
 /// <param name="SwitchDrop">Constant part of the switch's voltage, V; 0 to 1e5.</param>
@@ -15,9 +15,9 @@ namespace Selector.Engine.Circuits.StepDown;
 /// <param name="DiodeSlope">Ohm; 0 to 1e6.</param>
 /// <param name="Inductance">H; 1e-10 to 1e3.</param>
 /// <param name="CoilResistance">Ohm; 0 to 1e6.</param>
-/// <param name="Capacitance">F; 1e-13 to 1e3.</param>
+/// <param name="Capacitance">F; 1e-13 to 10.</param>
 /// <param name="Esr">Equivalent series resistance of the capacitor, ohm; 0 to 1e6.</param>
-/// <param name="Esl">Equivalent series inductance of the capacitor, H; 0 (absent), or 1e-14 to 1.</param>
+/// <param name="Esl">Equivalent series inductance of the capacitor, H; 0 (absent), or 1e-14 to 1e-4.</param>
 /// <param name="LoadKind">Meaning of <paramref name="Load"/>.</param>
 /// <param name="Load">A, 0 to 1e6; or ohm, 1e-6 to 1e9.</param>
 public readonly record struct ConverterCase(
@@ -38,7 +38,7 @@ public readonly record struct ConverterCase(
 {
     /// <summary>Whether every field but the duty lies in its range; false for NaN.</summary>
     internal bool PartsAreInRange =>
-        Within(Frequency, 1, 1e8)
+        Within(Frequency, 100, 1e8)
         && Within(InputVoltage, 1e-3, 1e5)
         && Within(SwitchDrop, 0, 1e5)
         && Within(SwitchResistance, 0, 1e6)
@@ -46,9 +46,9 @@ public readonly record struct ConverterCase(
         && Within(DiodeSlope, 0, 1e6)
         && Within(Inductance, 1e-10, 1e3)
         && Within(CoilResistance, 0, 1e6)
-        && Within(Capacitance, 1e-13, 1e3)
+        && Within(Capacitance, 1e-13, 10)
         && Within(Esr, 0, 1e6)
-        && (Esl == 0 || Within(Esl, 1e-14, 1))
+        && (Esl == 0 || Within(Esl, 1e-14, 1e-4))
         && LoadKind switch
         {
             OutputLoad.Current => Within(Load, 0, 1e6),

@@ -66,7 +66,8 @@ public static partial class ConverterSolver
             EsrLoss = c.Esr * capacitorSquare,
             LoadPower = loadPower,
             InputPower = inputPower,
-            Efficiency = inputPower > 0 ? loadPower / inputPower : 0,
+            // Without any loss rounding alone may lift the quotient above 1.
+            Efficiency = inputPower > 0 ? Math.Min(1, loadPower / inputPower) : 0,
         };
     }
 }

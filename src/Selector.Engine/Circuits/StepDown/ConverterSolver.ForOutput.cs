@@ -5,7 +5,8 @@ public static partial class ConverterSolver
 {
     /// <summary>
     /// Finds the duty for a mean output voltage of <paramref name="outputMean"/> volts (above 0, at most 1e5) at the capacitor's
-    /// terminals; the duty of the case is not read. The mean rises with the duty, so the answer is the only one.
+    /// terminals; the duty of the case is not read. The mean rises with the duty as long as
+    /// the output ripple stays below about a tenth of it, and the answer is then the only one.
     /// NoOperatingPoint: the duty would exceed <paramref name="maxDuty"/> (above 0, at most 1), that is, the input is too low.
     /// A zero current load needs no duty: 0, without ripple, is the answer. A <paramref name="dutyGuess"/> from a neighbouring
     /// case saves work and does not change the result beyond rounding. Otherwise as <see cref="Solve"/>.
@@ -42,9 +43,9 @@ public static partial class ConverterSolver
         var search = new OutputError(c, phases, outputMean, budget);
         var averaged = AveragedLaw.Duty(c, outputMean, out search.FirstSlope);
         var guess = dutyGuess > 0 && dutyGuess < maxDuty ? dutyGuess : averaged;
-        if (!(guess < maxDuty))
+        if (!(guess > 0 && guess < maxDuty))
         {
-            // Only here is the greatest duty worth a solution of its own; elsewhere the search never comes near it.
+            // Only where the averaged law finds no duty is the greatest one worth a solution of its own.
             var error = search.At(maxDuty, out _);
             if (search.Status != SolveStatus.Solved)
             {
@@ -61,7 +62,7 @@ public static partial class ConverterSolver
         }
 
         var status = BracketedRoot.Find(
-            ref search, 0, maxDuty, -1, guess, 1e-12 * guess, 1e-11 * outputMean, budget, out var found);
+            ref search, 0, maxDuty, -1, guess, 1e-15, 1e-11 * outputMean, budget, out var found);
         if (search.Status != SolveStatus.Solved || status != SolveStatus.Solved)
         {
             return search.Status != SolveStatus.Solved ? search.Status : status;

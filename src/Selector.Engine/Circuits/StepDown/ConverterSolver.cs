@@ -8,8 +8,9 @@ public static partial class ConverterSolver
 {
     /// <summary>
     /// Solves at the duty that the case states. BadInput: a field outside its range, or a circuit that rings more than about
-    /// two thousand times between two switching instants. NoOperatingPoint: the switch drop or the load leaves no positive
-    /// output voltage, or the switch or the diode would have to carry current backwards. A zero current load charges the
+    /// three hundred times between two switching instants. NoOperatingPoint: the switch drop or the load leaves no positive
+    /// output voltage, or the diode would have to carry current backwards or take over while the coil rests (an output that swings
+    /// below ground). A zero current load charges the
     /// output to the peak of the switch node and lets no current flow.
     /// </summary>
     public static SolveStatus Solve(in ConverterCase c, in Budget budget, out ConverterSolution solution)

@@ -7,8 +7,8 @@ namespace Selector.Engine.Circuits.StepDown;
 /// </summary>
 internal static class IntervalSweep
 {
-    // Beyond this many half-radian pieces the circuit rings thousands of times between two switching instants.
-    private const int GreatestPieces = 4096;
+    // Pieces of four radians: beyond this many the circuit rings hundreds of times between two switching instants.
+    private const int GreatestPieces = 512;
 
     /// <summary>
     /// Adds the interval of <paramref name="time"/> seconds from <paramref name="start"/>. False where the circuit rings more

@@ -1,7 +1,7 @@
 namespace Selector.Engine.Circuits.StepDown;
 
 /// <summary>A step-down converter with its output terminals shorted, SI units. The output capacitor takes no part.</summary>
-/// <param name="Frequency">Switching frequency with the output shorted (folded back where the regulator does so), Hz; 1 to 1e8.</param>
+/// <param name="Frequency">Switching frequency with the output shorted (folded back where the regulator does so), Hz; 100 to 1e8.</param>
 /// <param name="InputVoltage">V; 1e-3 to 1e5.</param>
 /// <param name="SwitchDrop">V; 0 to 1e5.</param>
 /// <param name="SwitchResistance">Ohm; 0 to 1e6.</param>
