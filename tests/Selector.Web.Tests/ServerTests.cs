@@ -47,6 +47,14 @@ public sealed class ServerTests : IAsyncLifetime
         Assert.Contains("does not listen on", refusal.Message, StringComparison.Ordinal);
     }
 
+    [Fact]
+    public async Task It_refuses_before_anything_is_started()
+    {
+        await using var app = Server.Build(["--urls", "http://192.0.2.1:5080", .. Store]);
+
+        await Assert.ThrowsAsync<NotLoopbackException>(() => Server.Prepare(app));
+    }
+
     [Theory]
     [InlineData("/health/live")]
     [InlineData("/health/ready")]

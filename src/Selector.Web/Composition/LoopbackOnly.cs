@@ -11,7 +11,30 @@ public static class LoopbackOnly
         new[] { "urls", "http_ports", "https_ports" }.Any(key => !string.IsNullOrWhiteSpace(configuration[key]))
         || configuration.GetSection("Kestrel:Endpoints").GetChildren().Any();
 
-    /// <summary>Asked by the server for every end point that it is about to bind, wherever that was configured.</summary>
+    /// <summary>Looks at the addresses before anything is started, so that a refusal is one sentence.</summary>
+    /// <exception cref="NotLoopbackException">One of them can be reached from another machine.</exception>
+    public static void Demand(IConfiguration configuration)
+    {
+        ArgumentNullException.ThrowIfNull(configuration);
+        var urls = (configuration["urls"] ?? "").Split(';', StringSplitOptions.TrimEntries | StringSplitOptions.RemoveEmptyEntries)
+            .Concat(configuration.GetSection("Kestrel:Endpoints").GetChildren().Select(e => e["Url"] ?? ""))
+            .Where(u => u.Length > 0);
+        foreach (var url in urls)
+        {
+            var host = BindingAddress.Parse(url).Host;
+            if (!IsLoopback(host))
+            {
+                throw new NotLoopbackException(url);
+            }
+        }
+    }
+
+    /// <summary>Whether a host name or address means this machine and nothing else.</summary>
+    public static bool IsLoopback(string host) =>
+        string.Equals(host, "localhost", StringComparison.OrdinalIgnoreCase)
+        || (IPAddress.TryParse(host, out var address) && IPAddress.IsLoopback(address));
+
+    /// <summary>The last word: asked by the server for every end point that it is about to bind, wherever that was configured.</summary>
     /// <exception cref="NotLoopbackException">The end point can be reached from another machine.</exception>
     public static void Demand(ListenOptions endpoint)
     {

@@ -1,5 +1,3 @@
-using System.Net;
-
 namespace Selector.Web.Composition;
 
 /// <summary>
@@ -13,7 +11,7 @@ public static class SameSite
         ArgumentNullException.ThrowIfNull(context);
         ArgumentNullException.ThrowIfNull(next);
         var request = context.Request;
-        if (!IsThisMachine(request.Host.Host))
+        if (!LoopbackOnly.IsLoopback(request.Host.Host))
         {
             return Refuse(context, StatusCodes.Status400BadRequest, "This server only answers under a loopback name, such as 127.0.0.1 or localhost.");
         }
@@ -32,10 +30,6 @@ public static class SameSite
         "null" => request.Headers["Sec-Fetch-Site"] == "same-origin",
         var origin => origin == $"{request.Scheme}://{request.Host}",
     };
-
-    private static bool IsThisMachine(string host) =>
-        string.Equals(host, "localhost", StringComparison.OrdinalIgnoreCase)
-        || (IPAddress.TryParse(host, out var address) && IPAddress.IsLoopback(address));
 
     private static Task Refuse(HttpContext context, int status, string reason)
     {

@@ -42,6 +42,7 @@ public static class Server
     /// <summary>Brings the store to this version and says where the server is once it listens.</summary>
     public static async Task Prepare(WebApplication app)
     {
+        LoopbackOnly.Demand(app.Configuration);
         await StoreServices.Prepare(app.Services, app.Lifetime.ApplicationStopping);
         app.Lifetime.ApplicationStarted.Register(() =>
         {

@@ -60,10 +60,6 @@ internal static class WhyWords
         _ => "searched",
     };
 
-    /// <summary>Why the direction is what it is; the words of the stage.</summary>
-    public static string Proof(AxisFinding axis) =>
-        axis.Push == Push.Unproven ? "no direction is proven, so ends and inside are searched" : axis.Why;
-
     private static string Certainty(Certainty certainty) => certainty switch
     {
         Engine.Derating.Certainty.SeenAtIssuer => "seen at the issuer",
