@@ -56,7 +56,7 @@ public class SenseBankTests
     public void NoCornerAndNoPointInsideExceedsIt(DoNotSize<ulong> seed)
     {
         var maker = new CaseMaker(seed.Item);
-        var n = 1 + maker.Pick(7);
+        var n = 1 + maker.Pick(5);
         var (r, t, i) = (maker.Log(1e-3, 1e3), maker.Even(0, 0.5), maker.Log(1e-3, 1e2));
         SenseBank.AtCurrent(n, r, t, i, out var s);
         SenseBank.AtVoltage(n, r, t, i, out var v);

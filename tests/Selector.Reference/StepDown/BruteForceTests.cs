@@ -10,7 +10,7 @@ public class BruteForceTests
     public void TheClosedFormAgreesWithSmallSteps()
     {
         var (compared, discontinuous, stiff) = (0, 0, 0);
-        for (var seed = 0UL; seed < 400; seed++)
+        for (var seed = 0UL; seed < 200; seed++)
         {
             var c = new CaseMaker(seed * 7919 + 5).Case();
             var beside = c.Esl > 0 && c.LoadKind == OutputLoad.Resistance;
@@ -47,6 +47,6 @@ public class BruteForceTests
         }
 
         // The sample must not have shrunk to the easy part.
-        Assert.True(compared >= 380 && discontinuous >= 100 && stiff >= 50, $"{compared} {discontinuous} {stiff}");
+        Assert.True(compared >= 190 && discontinuous >= 60 && stiff >= 25, $"{compared} {discontinuous} {stiff}");
     }
 }

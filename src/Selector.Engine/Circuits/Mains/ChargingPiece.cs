@@ -38,6 +38,12 @@ internal struct ChargingPiece
         }
     }
 
+    /// <summary>Fastest rate at which a transient dies away without ringing, 1/s; 0 where it rings.</summary>
+    public readonly double FastestRate => !_inductive ? -_mean : _root > 0 ? Math.Sqrt(_root) - _mean : 0;
+
+    /// <summary>Angular frequency at which leakage and reservoir ring, 1/s; 0 when they do not.</summary>
+    public readonly double RingRate => _inductive && _root < 0 ? Math.Sqrt(-_root) : 0;
+
     /// <summary>State at a time inside the piece.</summary>
     public readonly void At(double t, out double u, out double j)
     {

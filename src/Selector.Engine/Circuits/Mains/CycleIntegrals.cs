@@ -6,6 +6,12 @@ internal struct CycleIntegrals
     private const int PanelsOfPulse = 5;
     private const int PanelsOfRest = 3;
 
+    /// <summary>One panel more for every radian that leakage and reservoir ring in a pulse.</summary>
+    private const int MostForRinging = 60;
+
+    /// <summary>A transient that fits this often into a piece is too fast for even panels.</summary>
+    private const double Stiff = 2;
+
     public double Bus, BusSquare, Load, Charge, ChargeSquare, CapacitorSquare, CapacitorCos, CapacitorSin, Source, LoadPower;
 
     /// <summary>Square of the reverse voltage, mean of all diodes, V²s.</summary>
@@ -30,16 +36,17 @@ internal struct CycleIntegrals
         RectifierDetail detail)
     {
         var sums = new CycleIntegrals { _busMax = double.NegativeInfinity, _busMin = double.PositiveInfinity, _peak = -1, _reverse = double.NegativeInfinity };
-        var panels = pieces.Length > 1 ? 1 : PanelsOfPulse;
+        var panels = pieces.Length > 1 ? 1 : PanelsOfPulse + Math.Min(MostForRinging, (int)(pieces[0].RingRate * (pulse.End - pulse.Start)));
         var nodes = pieces.Length > 1 ? NodesOfPiece : Nodes;
         var weights = pieces.Length > 1 ? WeightsOfPiece : Weights;
         for (var i = 0; i < pieces.Length; i++)
         {
             ref readonly var piece = ref pieces[i];
-            var width = (piece.End - piece.Start) / panels;
+            var from = i == 0 ? sums.Onset(path, piece, nodes, weights, reverse, detail, pulse) : piece.Start;
+            var width = (piece.End - from) / panels;
             for (var p = 0; p < panels; p++)
             {
-                sums.PulsePanel(path, piece, piece.Start + p * width, width, nodes, weights, reverse, detail, pulse);
+                sums.PulsePanel(path, piece, from + p * width, width, nodes, weights, reverse, detail, pulse);
             }
         }
 
@@ -59,6 +66,35 @@ internal struct CycleIntegrals
         }
 
         return sums;
+    }
+
+    /// <summary>
+    /// The first moments of a pulse from a stiff source, in which the current springs up: panels that grow with the transient's
+    /// own time. Returns where the even panels take over.
+    /// </summary>
+    private double Onset(
+        in ChargingPath path, in ChargingPiece piece, ReadOnlySpan<double> nodes, ReadOnlySpan<double> weights, PulseFigure reverse,
+        RectifierDetail detail, in PulseView pulse)
+    {
+        var width = piece.End - piece.Start;
+        var time = 1 / piece.FastestRate;
+        var from = piece.Start;
+        if (!(time * Stiff < width))
+        {
+            return from;
+        }
+
+        foreach (var share in (ReadOnlySpan<double>)[1, 3, 7, 14])
+        {
+            var to = Math.Min(piece.Start + share * time, piece.Start + width / 2);
+            if (to > from)
+            {
+                PulsePanel(path, piece, from, to - from, nodes, weights, reverse, detail, pulse);
+                from = to;
+            }
+        }
+
+        return from;
     }
 
     private void PulsePanel(

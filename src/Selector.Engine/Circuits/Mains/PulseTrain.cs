@@ -6,10 +6,14 @@ namespace Selector.Engine.Circuits.Mains;
 /// </summary>
 internal ref struct PulseTrain
 {
-    public const int MostPieces = 64;
+    public const int MostPieces = 192;
 
     /// <summary>Pieces of a pulse under a constant power; each straightens the load about its own middle.</summary>
     private const int PiecesOfPower = 12;
+    private const int MostPiecesOfPower = 80;
+
+    /// <summary>Way of the bus over one piece, as a share of the bus, that the straightened load may go.</summary>
+    private const double WidestSwing = 0.02;
     private const int Probes = 24;
     private const int MostSteps = 60;
 
@@ -111,9 +115,9 @@ internal ref struct PulseTrain
     private bool PulseOfPower(double u)
     {
         var (t, j) = (Start, 0.0);
-        var step = Length / PiecesOfPower;
         var v = _path.TerminalAtRest(u);
-        var (swing, swingBefore) = (double.NaN, double.NaN);
+        var (longest, shortest) = (Length / PiecesOfPower, Length / MostPiecesOfPower);
+        var (step, slope, bend) = (longest / 8, double.NaN, 0.0);
         while (Count < MostPieces - 1)
         {
             if (!(v > _path.Collapsed))
@@ -121,7 +125,15 @@ internal ref struct PulseTrain
                 return false;
             }
 
-            var piece = Straightened(t, step, u, j, v, ref swing, swingBefore);
+            if (double.IsNaN(slope))
+            {
+                slope = FirstSlope(t, shortest, u, j, v);
+            }
+
+            // A constant power is straight over a small way only: fast stretches are cut shorter, and so is the start.
+            step = Math.Clamp(WidestSwing * v / Math.Abs(slope), shortest, Math.Max(shortest, Math.Min(longest, 2 * step)));
+            var swing = (slope + bend * step / 2) * step;
+            var piece = new ChargingPiece(_path, LinearLoad.About(_path, v + swing / 2, swing * swing / 12), t, t + step, u, j);
             piece.At(t + step, out var uEnd, out var jEnd);
             if (!double.IsFinite(uEnd + jEnd))
             {
@@ -134,31 +146,21 @@ internal ref struct PulseTrain
             }
 
             _pieces[Count++] = piece;
-            (t, u, j) = (t + step, uEnd, jEnd);
-            var end = piece.Terminal(u, j);
-            (swingBefore, swing, v) = (swing, end - v, end);
+            var end = piece.Terminal(uEnd, jEnd);
+            var mean = (end - v) / step;
+            bend = Count == 1 ? 0 : (mean - slope) * 2 / step;
+            (t, u, j, v, slope) = (t + step, uEnd, jEnd, end, mean + (mean - slope));
         }
 
         return false;
     }
 
-    /// <summary>
-    /// A piece whose load is straightened about the middle of its own voltage: foretold from the two pieces before, or by a trial.
-    /// </summary>
-    private readonly ChargingPiece Straightened(double t, double step, double u, double j, double v, ref double swing, double swingBefore)
+    /// <summary>Slope of the bus at the start of a pulse, V/s, by a short trial.</summary>
+    private readonly double FirstSlope(double t, double step, double u, double j, double v)
     {
-        if (double.IsNaN(swingBefore))
-        {
-            var trial = new ChargingPiece(_path, LinearLoad.About(_path, v), t, t + step, u, j);
-            trial.At(t + step, out var uEnd, out var jEnd);
-            swing = trial.Terminal(uEnd, jEnd) - v;
-        }
-        else
-        {
-            swing += swing - swingBefore;
-        }
-
-        return new ChargingPiece(_path, LinearLoad.About(_path, v + swing / 2, swing * swing / 12), t, t + step, u, j);
+        var trial = new ChargingPiece(_path, LinearLoad.About(_path, v), t, t + step, u, j);
+        trial.At(t + step, out var uEnd, out var jEnd);
+        return (trial.Terminal(uEnd, jEnd) - v) / step;
     }
 
     /// <summary>Ends the pulse in a piece whose current is positive at low and negative at high.</summary>

@@ -10,9 +10,12 @@ public static class RectifierSolver
     private const double Tolerance = 1e-11;
     private const int PlainCycles = 4_000;
 
+    /// <summary>Charge into the reservoir that may be missing, as a share, before a solution is no solution.</summary>
+    private const double Unbalanced = 1e-3;
+
     /// <summary>
-    /// Solves a case. BadInput outside the ranges that <see cref="RectifierCase"/> states, or where the two halves of a centre tap
-    /// would conduct together for want of any pause; NoOperatingPoint when the source cannot carry the load.
+    /// Solves a case. BadInput outside the ranges that <see cref="RectifierCase"/> states, where the two halves of a centre tap would
+    /// conduct together for want of any pause, or where the current rings to zero within a half-wave; NoOperatingPoint when the source cannot carry the load.
     /// </summary>
     /// <param name="c">The case.</param>
     /// <param name="budget">Bound on cycles of the secant, and the caller's wish.</param>
@@ -59,9 +62,15 @@ public static class RectifierSolver
 
         solution = RectifierFigures.Of(c, path, train, pieces, detail);
         solution.Next = new RectifierStart(train.NextVoltage, slope);
-        return solution.IsFinite && !(detail == RectifierDetail.All && c.LoadKind == LoadKind.Power && solution.BusMin <= path.Collapsed)
-            ? SolveStatus.Solved
-            : SolveStatus.NoOperatingPoint;
+        if (!solution.IsFinite || (detail == RectifierDetail.All && c.LoadKind == LoadKind.Power && solution.BusMin <= path.Collapsed))
+        {
+            return SolveStatus.NoOperatingPoint;
+        }
+
+        // Leakage and a small reservoir can ring the current to zero more than once in a half-wave. That is no supply, and this
+        // model has one pulse: the charge that then fails to balance gives it away.
+        var charge = solution.DiodeAverage * (path.PulsesPerPeriod == 2 ? 2 : 1);
+        return Math.Abs(charge - solution.LoadMean) <= Unbalanced * Math.Abs(solution.LoadMean) ? SolveStatus.Solved : SolveStatus.BadInput;
     }
 
     private static SolveStatus Find(

@@ -2,7 +2,7 @@ namespace Selector.Engine.Circuits.StepDown;
 
 /// <summary>
 /// The averaged step-down law with drops, neglecting ripple of the output and curvature of the coil current: first guesses for
-/// the exact solver. Continuous: Vout + Vf + I R = D (Vin - Vsw + Vf) (facts 05). Discontinuous: the charge of the current's
+/// the exact solver. Continuous: Vout + Vf + I R = D (Vin - Vsw + Vf), the volt-second balance. Discontinuous: the charge of the current's
 /// triangle equals the load's, D² (Va - V)(Va + Vf) = 2 L f I (V + Vf) with Va = Vin - Vsw.
 /// </summary>
 internal static class AveragedLaw

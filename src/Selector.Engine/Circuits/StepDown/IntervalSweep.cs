@@ -10,6 +10,9 @@ internal static class IntervalSweep
     // Pieces of four radians: beyond this many the circuit rings hundreds of times between two switching instants.
     private const int GreatestPieces = 512;
 
+    // Time constants after which an exponential is below rounding.
+    private const double SettledAfter = 40;
+
     /// <summary>
     /// Adds the interval of <paramref name="time"/> seconds from <paramref name="start"/>. False where the circuit rings more
     /// often within it than the model covers.
@@ -22,7 +25,32 @@ internal static class IntervalSweep
         }
 
         phase.Signals(start, out var coil, out var terminal, out var capacitor);
-        var pieces = Math.Ceiling(phase.Modes.Omega * time / 4);
+        var modes = phase.Modes;
+        var settling = modes.Fast < 0 ? SettledAfter / -modes.Fast : 0;
+        if (settling > 0 && time > 8 * settling)
+        {
+            // Once the fast mode has died out the rest needs only the few panels of the slow pair.
+            if (!AddPieces(modes, coil, terminal, capacitor, settling, ref figures))
+            {
+                return false;
+            }
+
+            var at = modes.At(settling) with { Fast = 0 };
+            (coil, terminal, capacitor) = (
+                coil.From(at, modes.Square), terminal.From(at, modes.Square), capacitor.From(at, modes.Square));
+            modes = modes with { Fast = 0 };
+            time -= settling;
+        }
+
+        return AddPieces(modes, coil, terminal, capacitor, time, ref figures);
+    }
+
+    // Where the circuit rings, panels must also be short against its period.
+    private static bool AddPieces(
+        in NaturalModes modes, in ModalSignal coil, in ModalSignal terminal, in ModalSignal capacitor, double time,
+        ref IntervalFigures figures)
+    {
+        var pieces = Math.Ceiling(modes.Omega * time / 4);
         if (!(pieces <= GreatestPieces))
         {
             return false;
@@ -30,17 +58,17 @@ internal static class IntervalSweep
 
         if (pieces <= 1)
         {
-            AddPiece(phase.Modes, coil, terminal, capacitor, time, ref figures);
+            AddPiece(modes, coil, terminal, capacitor, time, ref figures);
             return true;
         }
 
         var width = time / pieces;
-        var square = phase.Modes.Square;
+        var square = modes.Square;
         for (var i = 0; i < pieces; i++)
         {
-            var at = phase.Modes.At(i * width);
+            var at = modes.At(i * width);
             AddPiece(
-                phase.Modes, coil.From(at, square), terminal.From(at, square), capacitor.From(at, square), width, ref figures);
+                modes, coil.From(at, square), terminal.From(at, square), capacitor.From(at, square), width, ref figures);
         }
 
         return true;

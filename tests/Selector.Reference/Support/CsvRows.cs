@@ -1,6 +1,6 @@
 using System.Globalization;
 
-namespace Selector.Reference.StepDown;
+namespace Selector.Reference.Support;
 
 /// <summary>One row of a reference table by column name.</summary>
 internal sealed class CsvRow(IReadOnlyList<string> names, string[] cells)
@@ -22,6 +22,8 @@ internal sealed class CsvRow(IReadOnlyList<string> names, string[] cells)
             throw new KeyNotFoundException(name);
         }
     }
+
+    public bool Has(string name) => names.Contains(name);
 
     /// <summary>The cell as a number; an empty cell is not applicable and reads as zero.</summary>
     public double Number(string name) =>
