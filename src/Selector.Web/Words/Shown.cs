@@ -15,6 +15,11 @@ internal static class Shown
     /// <summary>Number and unit, or a dash.</summary>
     public static string Number(double? value, Unit? unit) => value is { } v ? QuantityWriter.Write(v, unit ?? Units.One) : Dash;
 
+    /// <summary>A margin as a figure. Below 0.1 % digits would be noise: it is then rounded to 0.01 %.</summary>
+    public static string Share(double? margin) => margin is not { } m ? Dash
+        : Math.Abs(m) < 1e-3 ? QuantityWriter.Write(Math.Round(m, 4, MidpointRounding.AwayFromZero), Units.Percent, trim: true)
+        : QuantityWriter.Write(m, Units.Percent);
+
     /// <summary>"≥ 35.0 V".</summary>
     public static string AtLeast(double value, Unit? unit) => "\u2265" + NarrowSpace + Number(value, unit);
 

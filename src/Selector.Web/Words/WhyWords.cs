@@ -17,7 +17,7 @@ internal static class WhyWords
         }
 
         var (s, a) = (Shown.Number(stress, spec.Unit), Shown.Number(allowed, spec.Unit));
-        var result = QuantityWriter.Write(margin, Units.Percent);
+        var result = Shown.Share(margin);
         return spec.Side switch
         {
             Side.Floor => $"1 \u2212 required / value = 1 \u2212 {a} / {s} = {result}",
