@@ -96,7 +96,8 @@ public class MainJobTests(Desk desk, ITestOutputHelper output)
         await sheet.Page.WaitForSelectorAsync("main[data-old='true']");
 
         Assert.Equal("1,234", await sheet.Page.Locator("[data-field='load.full'] input").InputValueAsync());
-        Assert.Contains("Full load", await sheet.Page.Locator("[data-field='load.full'] .fault").InnerTextAsync(), StringComparison.Ordinal);
+        Assert.Contains("1,234", await sheet.Page.Locator("[data-field='load.full'] .fault").InnerTextAsync(), StringComparison.Ordinal);
+        Assert.Contains("Full load", await sheet.Page.Locator("#faults").InnerTextAsync(), StringComparison.Ordinal);
         Assert.Equal(before, await sheet.Rows());
 
         await sheet.Page.Locator("[data-tool='undo']").ClickAsync();

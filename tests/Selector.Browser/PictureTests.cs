@@ -59,7 +59,7 @@ public class PictureTests(Desk desk)
         };
         var sheet = new SheetPage(page);
         await sheet.Open("/supply/2");
-        await page.Locator("tr[data-position='C1'] button").First.ClickAsync();
+        await page.Locator("tr[data-position='C1'][data-kind='ripple-current'] button").First.ClickAsync();
         await page.Locator("[data-candidate]").First.WaitForAsync(new() { Timeout = 60_000 });
 
         Assert.True(await page.Locator("[data-candidate]").CountAsync() > 5);
