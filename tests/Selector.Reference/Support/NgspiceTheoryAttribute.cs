@@ -1,4 +1,4 @@
-namespace Selector.Reference.StepDown;
+namespace Selector.Reference.Support;
 
 /// <summary>A theory that needs ngspice on the search path and is skipped, with that reason, where it is missing.</summary>
 [AttributeUsage(AttributeTargets.Method)]
