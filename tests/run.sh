@@ -14,7 +14,6 @@ needs() { # command package
 missing=()
 needs chromium chromium
 needs ngspice ngspice
-needs pdftoppm poppler-utils
 ldconfig -p 2>/dev/null | grep -q 'libicuuc\.so' || missing+=(libicu72)
 
 if [ "${#missing[@]}" -gt 0 ]; then
