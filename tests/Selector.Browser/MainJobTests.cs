@@ -4,6 +4,7 @@ using Selector.Browser.Support;
 using Selector.Documents.Sheets;
 using Selector.Documents.Tests.Support;
 using Selector.Engine.Quantities;
+using Selector.Engine.Supplies;
 using Xunit.Abstractions;
 
 namespace Selector.Browser;
@@ -24,7 +25,7 @@ public class MainJobTests(Desk desk, ITestOutputHelper output)
         var rows = await sheet.Rows();
 
         Assert.True(rows.Count > 30);
-        Assert.All(rows, r => Assert.Equal("holds", r.Verdict, ignoreCase: true));
+        Assert.All(rows, r => Assert.Equal(nameof(Verdict.Holds), r.Verdict));
         output.WriteLine($"first page after {desk.Server.FirstPage.TotalMilliseconds:0} ms");
     }
 
@@ -66,13 +67,13 @@ public class MainJobTests(Desk desk, ITestOutputHelper output)
         await sheet.Ready();
         await sheet.Type("load.full", "1A2");
         await sheet.Ready();
-        Assert.All(await sheet.Rows(), r => Assert.Contains(r.Verdict, (string[])["noPart", "no-part", "NoPart"]));
+        Assert.All(await sheet.Rows(), r => Assert.True(r.Verdict == nameof(Verdict.NoPart), $"{r.Position} {r.Kind} {r.Verdict}"));
 
         await page.Locator("tr[data-position='C1'] button").First.ClickAsync();
         var fit = page.Locator("[data-tool='fit']").First;
         await fit.WaitForAsync(new() { Timeout = 60_000 });
         await fit.ClickAsync();
-        await page.WaitForFunctionAsync("() => document.querySelector(\"tr[data-position='C1'][data-kind='voltage']\").dataset.verdict.toLowerCase() === 'holds'");
+        await page.WaitForFunctionAsync("() => document.querySelector(\"tr[data-position='C1'][data-kind='voltage']\").dataset.verdict === 'Holds'");
         await sheet.Ready();
         var before = await sheet.Rows();
         var address = page.Url;

@@ -73,6 +73,18 @@ public class PictureTests(Desk desk)
         Assert.True(result.Violations.Length == 0, string.Join("; ", result.Violations.Select(v => $"{v.Id} {v.Nodes.FirstOrDefault()?.Html}")));
     }
 
+    [ChromiumFact]
+    public async Task Printed_the_sheet_drops_its_tools_and_fits()
+    {
+        var page = await desk.Page();
+        await new SheetPage(page).Open("/supply/2");
+        await page.EmulateMediaAsync(new PageEmulateMediaOptions { Media = Media.Print });
+
+        Assert.Empty(await page.Locator("button[data-tool]:visible").AllInnerTextsAsync());
+        Assert.True(await page.EvaluateAsync<bool>("() => document.documentElement.scrollWidth <= window.innerWidth"));
+        await Keep(page, "print-supply-2");
+    }
+
     private static async Task Settled(IPage page, string address)
     {
         if (address is "/supply/1" or "/supply/2")

@@ -61,7 +61,7 @@ public abstract class StageModel
     /// <summary>What is drawn, plotted, measured and warned of.</summary>
     public StageView View { get; protected init; } = StageView.Empty;
 
-    /// <summary>Relative error of the solver; every bound is widened by it.</summary>
+    /// <summary>Relative error of the solver: two computations of one supply that differ by less agree.</summary>
     public double Error { get; protected init; } = 1e-6;
 
     /// <summary>Solves the stage at one condition. Must write every link and stress, all finite, when it returns Solved.</summary>

@@ -3,15 +3,7 @@ namespace Selector.Engine.Quantities;
 /// <summary>A closed interval of real numbers; either end may be infinite. The default is the single point 0.</summary>
 public readonly record struct Interval(double Low, double High)
 {
-    /// <summary>Everything.</summary>
-    public static Interval Unbounded { get; } = new(double.NegativeInfinity, double.PositiveInfinity);
-
-    /// <summary>From just above zero up, for ratings that must be positive.</summary>
-    public static Interval Positive { get; } = new(double.Epsilon, double.PositiveInfinity);
-
     public double Width => High - Low;
-
-    public double Middle => Low + (High - Low) / 2;
 
     /// <summary>Both ends included; false for NaN.</summary>
     public bool Contains(double value) => value >= Low && value <= High;

@@ -56,8 +56,8 @@ public class SenseBankTests
     public void NoCornerAndNoPointInsideExceedsIt(DoNotSize<ulong> seed)
     {
         var maker = new CaseMaker(seed.Item);
-        var n = 1 + maker.Pick(5);
-        var (r, t, i) = (maker.Log(1e-3, 1e3), maker.Even(0, 0.5), maker.Log(1e-3, 1e2));
+        var n = 1 + maker.Dice.Pick(5);
+        var (r, t, i) = (maker.Dice.Log(1e-3, 1e3), maker.Dice.Even(0, 0.5), maker.Dice.Log(1e-3, 1e2));
         SenseBank.AtCurrent(n, r, t, i, out var s);
         SenseBank.AtVoltage(n, r, t, i, out var v);
         var (one, total, current, voltageOne, voltageTotal) = (0.0, 0.0, 0.0, 0.0, 0.0);
@@ -77,7 +77,7 @@ public class SenseBankTests
             voltageOne = Math.Max(voltageOne, i * i / first);
             // The first resistor anywhere inside its tolerance, the others in this corner.
             var others = conductance - 1 / first;
-            foreach (var x in new[] { first, r * (1 + t * maker.Even(-1, 1)) })
+            foreach (var x in new[] { first, r * (1 + t * maker.Dice.Even(-1, 1)) })
             {
                 one = Math.Max(one, Math.Pow(i / (1 + x * others), 2) * x);
             }

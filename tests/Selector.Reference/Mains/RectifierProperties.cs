@@ -35,6 +35,16 @@ public class RectifierProperties
         }
     }
 
+    /// <summary>The properties pass over what has no solution; this says that it is the exception.</summary>
+    [Fact]
+    public void Most_of_the_made_cases_are_solved()
+    {
+        var solved = Enumerable.Range(0, 2_000).Count(seed =>
+            RectifierSolver.Solve(new RectifierMaker((ulong)seed).Case(), Budget.Standard, out _) == SolveStatus.Solved);
+
+        Assert.True(solved > 1_600, $"{solved} of 2000");
+    }
+
     /// <summary>Directions that the ledger relies on: the bus rises with the source and falls with load and winding resistance.</summary>
     [Property(MaxTest = 10_000)]
     public void The_bus_follows_the_source_and_gives_way_to_load_and_resistance(ulong seed)

@@ -30,7 +30,7 @@ public class ConverterProperties
     {
         var maker = new CaseMaker(seed.Item);
         var c = maker.Case(filter: 500);
-        var wanted = (c.InputVoltage - c.SwitchDrop) * maker.Even(0.1, 0.98);
+        var wanted = (c.InputVoltage - c.SwitchDrop) * maker.Dice.Even(0.1, 0.98);
         var status = ConverterSolver.SolveForOutput(c, wanted, Budget.Standard, out var duty, out var s);
         if (status == SolveStatus.NoOperatingPoint)
         {
@@ -53,7 +53,7 @@ public class ConverterProperties
         var maker = new CaseMaker(seed.Item);
         // With an output ripple of tens of per cent the filter rings with the switching, and the rise is not certain.
         var c = maker.Case(filter: 100);
-        var less = c with { Duty = c.Duty * maker.Even(0.5, 0.999) };
+        var less = c with { Duty = c.Duty * maker.Dice.Even(0.5, 0.999) };
         ConverterSolver.Solve(c, Budget.Standard, out var more);
         if (ConverterSolver.Solve(less, Budget.Standard, out var s) == SolveStatus.Solved)
         {
@@ -66,7 +66,7 @@ public class ConverterProperties
     {
         var maker = new CaseMaker(seed.Item);
         var c = Spoil(ref maker, maker.Case());
-        if (maker.Chance(0.3))
+        if (maker.Dice.Chance(0.3))
         {
             c = Spoil(ref maker, c);
         }
@@ -86,8 +86,8 @@ public class ConverterProperties
             0, -1, double.NaN, 1e300, -1e300, 1e-300, double.PositiveInfinity, double.NegativeInfinity, double.Epsilon,
             1, 1e-3, 1e3, 1e-6, 1e6, 1e-9, 1e-12, 1e9,
         ];
-        var v = bad[maker.Pick(bad.Length)];
-        return maker.Pick(15) switch
+        var v = bad[maker.Dice.Pick(bad.Length)];
+        return maker.Dice.Pick(15) switch
         {
             0 => c with { Frequency = v },
             1 => c with { InputVoltage = v },

@@ -100,12 +100,12 @@ public class ShortCircuitTests
     private static ShortCircuitCase Case(ulong seed)
     {
         var m = new CaseMaker(seed);
-        var f = m.Log(1e4, 1e6);
-        var vin = m.Log(6, 60);
-        var l = m.Log(2e-6, 5e-4);
+        var f = m.Dice.Log(1e4, 1e6);
+        var vin = m.Dice.Log(6, 60);
+        var l = m.Dice.Log(2e-6, 5e-4);
         return new(
-            f, vin, m.Even(0, 0.05) * vin, m.Log(1e-3, 0.5), m.Even(0.2, 1), m.Log(1e-3, 0.1), l, m.Log(1e-2, 0.5),
-            m.Log(1e-2, 1), m.Log(0.3, 10), m.Log(5e-8, 5e-7), m.Chance(0.4), m.Even(0.8, 1));
+            f, vin, m.Dice.Even(0, 0.05) * vin, m.Dice.Log(1e-3, 0.5), m.Dice.Even(0.2, 1), m.Dice.Log(1e-3, 0.1), l, m.Dice.Log(1e-2, 0.5),
+            m.Dice.Log(1e-2, 1), m.Dice.Log(0.3, 10), m.Dice.Log(5e-8, 5e-7), m.Dice.Chance(0.4), m.Dice.Even(0.8, 1));
     }
 
     // Explicit steps of the regulator's own rule: each period on until limit or greatest duty, but never below the least time.

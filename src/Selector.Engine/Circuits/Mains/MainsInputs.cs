@@ -8,10 +8,7 @@ internal sealed class MainsInputs
 {
     private const string T1 = "T1";
 
-    /// <summary>Copper: resistance is proportional to this plus the temperature in °C. IEC 60034-1 uses 235, IEC 61558-1 234.5 (second-hand).</summary>
-    private const double CopperZero = 234.5;
-
-    /// <summary>Winding limit assumed where the transformer does not state its class: class A in normal use, the lowest.</summary>
+    /// <summary>Winding limit assumed where the transformer does not state its class: class A in normal use, the lowest (IEC 61558-1, from memory).</summary>
     private const double LeastWindingLimit = 100;
 
     private readonly int _mains;
@@ -61,7 +58,7 @@ internal sealed class MainsInputs
     public RectifierCase Circuit(ReadOnlySpan<double> inputs, FrontEndTopology topology, double nominal, double capacitance, double esr, double power)
     {
         var temperature = inputs[_ambient] + inputs[_winding] * Math.Max(0, inputs[_windingMax] - inputs[_ambient]);
-        var resistance = inputs[_resistance] * (CopperZero + temperature) / (CopperZero + inputs[_resistanceAt]);
+        var resistance = Copper.At(inputs[_resistance], inputs[_resistanceAt], temperature);
 
         // A single winding with two halves in series feeds a bridge or a half wave with both.
         var halves = topology.Halves == 1 ? inputs[Halves] : 1;

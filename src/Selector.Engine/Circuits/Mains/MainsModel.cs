@@ -16,7 +16,6 @@ internal sealed class MainsModel : ReservoirModel
 
     private static readonly InputId Mains = InputId.Axis(MainsStage.MainsAxis);
     private static readonly InputId Winding = InputId.Axis(MainsStage.WindingAxis);
-    
 
     private readonly FrontEndTopology _topology;
     private readonly double _nominal;
@@ -72,6 +71,8 @@ internal sealed class MainsModel : ReservoirModel
             new(topology.Rectifier, LinkNames.Loss(topology.Rectifier), LinkNames.Temperature(topology.Rectifier),
                 RectifierRatings.Cooling, RectifierRatings.JunctionMax),
         ];
+        // Against the public tables: constant power straightened over pieces of 2 % of the bus.
+        Error = 1e-4;
         NotAssessed = MainsOpenPoints.List(topology.Rectifier);
         View = new StageView(
         [

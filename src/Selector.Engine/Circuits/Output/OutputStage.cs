@@ -60,12 +60,6 @@ public sealed class OutputStage : IStage
                     v => QuantityWriter.Write(v, Units.Celsius)),
             ];
             NotAssessed = [new("J2", "output terminals, continuous and shorted current")];
-            View = new StageView(
-            [
-                "Hot surfaces can burn. Let the unit cool before you touch parts, and keep hot resistors clear of electrolytics.",
-                "Computed figures do not replace measurement of temperature, ripple and inrush on the first unit.",
-                "Local codes and a licensed person decide; this sheet does not replace them.",
-            ]);
         }
 
         public override SolveStatus Solve(ReadOnlySpan<double> inputs, Span<double> links, Span<double> stresses, in Budget budget) => SolveStatus.Solved;

@@ -30,10 +30,8 @@ public static class ReservoirCapacitor
     /// <param name="nominal">F.</param>
     /// <param name="tolerance">Symmetric share.</param>
     /// <param name="place">0 for low and aged, 1 for high and new.</param>
-    public static double Capacitance(double nominal, double tolerance, double place)
-    {
-        return nominal * new Interval((1 - tolerance) * AgedCapacitance, 1 + tolerance).At(place);
-    }
+    public static double Capacitance(double nominal, double tolerance, double place) =>
+        nominal * new Interval((1 - tolerance) * AgedCapacitance, 1 + tolerance).At(place);
 
     /// <summary>ESR at a place of its axis, for either column.</summary>
     /// <param name="greatest">As the data sheet limits it, ohm.</param>

@@ -94,12 +94,7 @@ public abstract class ReservoirModel : StageModel
     /// <summary>Writes the stresses of C1.</summary>
     protected void WriteReservoir(ReadOnlySpan<double> inputs, Span<double> stresses, double busMax, double lowRipple, double lowFrequency)
     {
-        Span<double> table = stackalloc double[FrequencyMultiplier.Keys.Length];
-        for (var i = 0; i < table.Length; i++)
-        {
-            table[i] = inputs[_firstMultiplier + i] is > 0 and var m ? m : double.NaN;
-        }
-
+        var table = inputs.Slice(_firstMultiplier, FrequencyMultiplier.Keys.Length);
         stresses[_voltage] = busMax;
         stresses[_ripple] = RippleWeight.Equivalent(table, lowRipple, lowFrequency, inputs[RippleIn], inputs[FrequencyIn]);
         stresses[_temperature] = inputs[_ambient];

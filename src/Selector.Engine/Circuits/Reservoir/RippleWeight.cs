@@ -6,7 +6,7 @@ namespace Selector.Engine.Circuits.Reservoir;
 public static class RippleWeight
 {
     /// <summary>Equivalent of two currents.</summary>
-    /// <param name="table">Multipliers in the order of <see cref="FrequencyMultiplier.Keys"/>; NaN where the maker says nothing.</param>
+    /// <param name="table">Multipliers in the order of <see cref="FrequencyMultiplier.Keys"/>; 0 or NaN where the maker says nothing.</param>
     /// <param name="low">A rms, at <paramref name="lowFrequency"/> and above.</param>
     /// <param name="lowFrequency">Hz.</param>
     /// <param name="high">A rms, at <paramref name="highFrequency"/> and above.</param>
@@ -26,7 +26,14 @@ public static class RippleWeight
             return 0;
         }
 
-        var multiplier = FrequencyMultiplier.At(table, frequency);
+        // The inputs of a stage are finite: a blank of the table reaches it as 0.
+        Span<double> given = stackalloc double[table.Length];
+        for (var i = 0; i < given.Length; i++)
+        {
+            given[i] = table[i] > 0 ? table[i] : double.NaN;
+        }
+
+        var multiplier = FrequencyMultiplier.At(given, frequency);
         return current / (double.IsNaN(multiplier) ? 1 : multiplier);
     }
 }

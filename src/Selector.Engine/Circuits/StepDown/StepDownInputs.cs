@@ -9,8 +9,8 @@ namespace Selector.Engine.Circuits.StepDown;
 /// <summary>What the converter reads, and the circuit that it makes of it at a condition.</summary>
 internal sealed class StepDownInputs
 {
-    /// <summary>Copper, change of resistance from 20 °C, 1/K. Common to hand-books: 1 / (234.5 + 20).</summary>
-    private const double CopperDrift = 0.00393;
+    /// <summary>Temperature at which coils are rated, °C.</summary>
+    private const double CoilRatedAt = 20;
 
     private readonly int _frequency, _drop, _resistance, _resistanceDrift, _transition, _quiescent, _limit, _onTime, _shortFrequency, _skips;
     private readonly int _threshold, _thresholdDrift, _slope;
@@ -97,7 +97,7 @@ internal sealed class StepDownInputs
         Math.Max(0, x[_threshold] + x[_thresholdDrift] * (x[_diodeTemperature] - 25)),
         x[_slope],
         x[_inductance] * (1 + x[_inductanceTolerance] * x[_inductancePlace]),
-        x[_coil] * (1 + CopperDrift * (x[_coilTemperature] - 20)),
+        Copper.At(x[_coil], CoilRatedAt, x[_coilTemperature]),
         ReservoirCapacitor.Capacitance(x[_capacitance], x[_capacitanceTolerance], x[_capacitancePlace]),
         ReservoirCapacitor.Esr(x[_esr], x[_esrPlace]),
         0,
@@ -119,14 +119,6 @@ internal sealed class StepDownInputs
         x[_ambient] + (x[_coilRms] > 0 ? x[_coilRise] * rms * rms / (x[_coilRms] * x[_coilRms]) : 0);
 
     /// <summary>Ripple current of C2 as one at the frequency of its rating, A.</summary>
-    public double WeightedRipple(ReadOnlySpan<double> x, double rms)
-    {
-        Span<double> table = stackalloc double[FrequencyMultiplier.Keys.Length];
-        for (var i = 0; i < table.Length; i++)
-        {
-            table[i] = x[_firstMultiplier + i] is > 0 and var m ? m : double.NaN;
-        }
-
-        return RippleWeight.Equivalent(table, 0, 0, rms, x[_frequency]);
-    }
+    public double WeightedRipple(ReadOnlySpan<double> x, double rms) =>
+        RippleWeight.Equivalent(x.Slice(_firstMultiplier, FrequencyMultiplier.Keys.Length), 0, 0, rms, x[_frequency]);
 }
