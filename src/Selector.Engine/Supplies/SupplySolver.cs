@@ -8,7 +8,7 @@ namespace Selector.Engine.Supplies;
 /// </summary>
 public sealed class SupplySolver
 {
-    private const int MostSweeps = 60; public static long Sweeps, Solves;
+    private const int MostSweeps = 60;
     private const double LinkTolerance = 1e-7;
 
     /// <summary>Sweeps by plain substitution before a loop that does not settle is left unaccelerated for good.</summary>
