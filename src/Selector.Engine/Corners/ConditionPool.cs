@@ -13,13 +13,14 @@ public sealed class ConditionPool
     private readonly SupplySolver _solver;
     private readonly Budget _budget;
     private readonly Dictionary<double[], Condition> _solved = new(new SameAxes());
-    private double[]? _lastLinks;
+    private readonly double[] _weights;
 
     public ConditionPool(SupplyModel model, SupplySolver solver, in Budget budget)
     {
         _model = model;
         _solver = solver;
         _budget = budget;
+        _weights = [.. model.Axes.Select(a => a.IsFixed ? 0 : (a.EndsOnly ? 20 : a.Probes > 1 ? 4 : 1) / a.Range.Width)];
     }
 
     public IEnumerable<Condition> All => _solved.Values;
@@ -30,6 +31,7 @@ public sealed class ConditionPool
     public Condition? Known(double[] axes) => _solved.GetValueOrDefault(axes);
 
     /// <summary>Solves at these axes, or recalls it.</summary>
+    /// <param name="axes">A value for every axis.</param>
     /// <exception cref="OperationCanceledException">The caller no longer wants the answer.</exception>
     public Condition At(double[] axes)
     {
@@ -39,13 +41,13 @@ public sealed class ConditionPool
         }
 
         var links = new double[_model.Links.Length];
-        if (_lastLinks is null)
+        if (Nearest(axes) is { } near)
         {
-            _solver.Start(links);
+            near.Links.CopyTo(links, 0);
         }
         else
         {
-            _lastLinks.CopyTo(links, 0);
+            _solver.Start(links);
         }
 
         var stresses = new double[_model.Stresses.Length];
@@ -55,14 +57,31 @@ public sealed class ConditionPool
             throw new OperationCanceledException(_budget.Cancel);
         }
 
-        if (status == SolveStatus.Solved)
-        {
-            _lastLinks = links;
-        }
-
         var condition = new Condition((double[])axes.Clone(), status, links, stresses);
         _solved.Add(condition.Axes, condition);
         return condition;
+    }
+
+    /// <summary>The solved condition whose loops are likely to stand closest: an axis that switches the circuit counts most.</summary>
+    private Condition? Nearest(double[] axes)
+    {
+        Condition? nearest = null;
+        var least = double.PositiveInfinity;
+        foreach (var c in _solved.Values)
+        {
+            var distance = 0.0;
+            for (var a = 0; a < axes.Length && distance < least; a++)
+            {
+                distance += _weights[a] * Math.Abs(axes[a] - c.Axes[a]);
+            }
+
+            if (distance < least && c.Solved)
+            {
+                (nearest, least) = (c, distance);
+            }
+        }
+
+        return nearest;
     }
 
     private sealed class SameAxes : IEqualityComparer<double[]>

@@ -12,13 +12,17 @@ public sealed class CornerSearch
     private const int MostRounds = 4;
     private const double GoldenShare = 0.3819660112501051;
     private const double Worth = 1e-6;
-    private const int MostSections = 16;
+    private const int MostSections = 18;
+
+    /// <summary>Times that a seeming top is doubted.</summary>
+    private const int MostCuts = 2;
+
 
     /// <summary>A flat top is found to its square: a thousandth of the range leaves less than a millionth of the height.</summary>
     private const double SectionEnd = 1e-3;
 
     /// <summary>Step inwards, as a share of the range, that tells whether an end is a maximum.</summary>
-    private const double EndStep = 1e-3;
+    private const double EndStep = 2e-3;
 
     /// <summary>Relative difference below which two corners are equally bad.</summary>
     private const double Tie = 1e-6;
@@ -205,50 +209,84 @@ public sealed class CornerSearch
             return best;
         }
 
+        if (axis.Probes == 0)
+        {
+            return best;
+        }
+
+        var step = axis.Range.Width / (axis.Probes + 1.0);
         for (var probe = 1; probe <= axis.Probes; probe++)
         {
-            best = Worse(best, Moved(through, a, axis.Range.At(probe / (axis.Probes + 1.0))), severity);
+            best = Worse(best, Moved(through, a, axis.Range.Low + probe * step), severity);
         }
 
-        return axis.Probes > 0 && RisesInwards(best, a, severity) ? Inside(best, a, severity) : best;
+        return Inside(best, a, step, severity);
     }
 
-    /// <summary>Whether the worst point so far is inside already, or stands at an end from which severity grows inwards.</summary>
-    private bool RisesInwards(Condition best, int a, Severity severity)
+    /// <summary>
+    /// A maximum between two ends, by parabolas through the worst point and its neighbours. At an end a parabola through the three
+    /// points there, or else a small step, tells whether severity grows inwards.
+    /// </summary>
+    private Condition Inside(Condition best, int a, double step, Severity severity)
     {
         var range = _model.Axes[a].Range;
-        if (best.Axes[a] > range.Low && best.Axes[a] < range.High)
+        var middle = Math.Clamp(best.Axes[a], range.Low + step, range.High - step);
+        var (low, mid, high) = (Moved(best, a, middle - step), Moved(best, a, middle), Moved(best, a, middle + step));
+        if (best == low && !(Top(low, mid, high, a, severity) > low.Axes[a]))
         {
-            return true;
+            (mid, high) = (Moved(best, a, low.Axes[a] + EndStep * range.Width), mid);
+        }
+        else if (best == high && !(Top(low, mid, high, a, severity) < high.Axes[a]))
+        {
+            (low, mid) = (mid, Moved(best, a, high.Axes[a] - EndStep * range.Width));
         }
 
-        var step = range.Width * (best.Axes[a] <= range.Low ? EndStep : -EndStep);
-        return Worse(best, Moved(best, a, best.Axes[a] + step), severity) != best;
-    }
-
-    /// <summary>A maximum between two ends, closed in on by the golden section.</summary>
-    private Condition Inside(Condition through, int a, Severity severity)
-    {
-        var axis = _model.Axes[a];
-        var step = axis.Range.Width / (axis.Probes + 1.0);
-        var (low, high) = (Math.Max(axis.Range.Low, through.Axes[a] - step), Math.Min(axis.Range.High, through.Axes[a] + step));
-        var best = through;
-        for (var i = 0; i < MostSections && high - low > SectionEnd * axis.Range.Width; i++)
+        best = Worse(best, mid, severity);
+        var (cuts, halved) = (0, high.Axes[a] - low.Axes[a]);
+        for (var i = 1; i <= MostSections && low.Solved && mid.Solved && high.Solved; i++)
         {
-            var left = Moved(through, a, low + GoldenShare * (high - low));
-            var right = Moved(through, a, high - GoldenShare * (high - low));
-            best = Worse(Worse(best, left, severity), right, severity);
-            if (left.Solved && (!right.Solved || severity.Of(left) > severity.Of(right)))
+            var (x, left, right) = (mid.Axes[a], mid.Axes[a] - low.Axes[a], high.Axes[a] - mid.Axes[a]);
+            var at = Top(low, mid, high, a, severity);
+            if (!(at > low.Axes[a] && at < high.Axes[a]))
             {
-                high = right.Axes[a];
+                break;
             }
-            else
+
+            // A smooth top is found to its square; at a kink parabolas creep or stop short, and the wider side is cut instead.
+            var flat = Math.Abs(at - x) < SectionEnd * range.Width;
+            if (flat && cuts++ == MostCuts)
             {
-                low = left.Axes[a];
+                break;
             }
+
+            if (flat || (i % 3 == 0 && left + right > halved / 2))
+            {
+                at = left > right ? x - GoldenShare * left : x + GoldenShare * right;
+            }
+
+            halved = i % 3 == 0 ? left + right : halved;
+            var found = Moved(best, a, at);
+            best = Worse(best, found, severity);
+            if (!found.Solved)
+            {
+                break;
+            }
+
+            var (lower, upper) = at < x ? (found, mid) : (mid, found);
+            (low, mid, high) = severity.Of(lower) >= severity.Of(upper) ? (low, lower, upper) : (lower, upper, high);
         }
 
         return best;
+    }
+
+    /// <summary>Where the parabola through three points is highest; NaN where it has no top.</summary>
+    private static double Top(Condition low, Condition mid, Condition high, int a, Severity severity)
+    {
+        var (x, y) = (mid.Axes[a], severity.Of(mid));
+        var (dl, dh) = (x - low.Axes[a], high.Axes[a] - x);
+        var (fl, fh) = ((y - severity.Of(low)) / dl, (severity.Of(high) - y) / dh);
+        var bend = (fh - fl) / (dl + dh);
+        return bend < 0 ? x - (fl + bend * dl) / (2 * bend) : double.NaN;
     }
 
     private Condition Moved(Condition from, int axis, double value)

@@ -9,10 +9,12 @@ namespace Selector.Engine.Supplies;
 public sealed class SupplySolver
 {
     private const int MostSweeps = 60;
-    private const double LinkTolerance = 1e-7;
 
-    /// <summary>Sweeps by plain substitution before a loop that does not settle is left unaccelerated for good.</summary>
-    private const int TrustedSweeps = 30;
+    /// <summary>Relative residual of the loops within which a condition is solved.</summary>
+    private const double LinkTolerance = 1e-6;
+
+    /// <summary>Relative residual from which one more step lands within the tolerance, as a rule; the last sweep makes sure.</summary>
+    private const double Near = 5e-5;
 
     private const double Damping = 0.5;
 
@@ -20,16 +22,18 @@ public sealed class SupplySolver
     private readonly double[][] _inputs;
     private readonly double[] _before;
     private readonly int[] _loop;
-    private readonly LoopAcceleration _acceleration;
+    private readonly double[] _residual;
+    private readonly LoopSteps _steps;
 
     /// <param name="model">The stages, wired.</param>
     /// <param name="fittings">Parts by position; an empty position is solved with the stage's stand-in.</param>
     public SupplySolver(SupplyModel model, IReadOnlyDictionary<string, Fitting> fittings)
     {
         _model = model;
-        _before = new double[model.Links.Length];
-        _loop = [.. Enumerable.Range(0, model.Links.Length).Where(i => !model.Links[i].IsHint)];
-        _acceleration = new LoopAcceleration(_loop);
+        _loop = [.. model.Wiring.Loop];
+        _before = new double[_loop.Length];
+        _residual = new double[_loop.Length];
+        _steps = new LoopSteps(_loop.Length);
         _inputs = new double[model.Stages.Length][];
         for (var stage = 0; stage < model.Stages.Length; stage++)
         {
@@ -44,21 +48,23 @@ public sealed class SupplySolver
     /// <param name="budget">Bound on work.</param>
     public SolveStatus Solve(ReadOnlySpan<double> axes, Span<double> links, Span<double> stresses, in Budget budget)
     {
-        var status = Close(axes, links, stresses, true, budget);
+        _steps.Begin();
+        var status = Close(axes, links, stresses, false, budget);
         if (status is SolveStatus.Solved or SolveStatus.Cancelled)
         {
             return status;
         }
 
-        // A combination of sweeps, or a neighbour's solution, may lie across a collapse. Creeping up from a lightly loaded bus
-        // finds the operating point that a charged supply settles at, if there is one.
+        // A step, or a neighbour's solution, may lie across a collapse. Creeping up from a lightly loaded bus finds the operating
+        // point that a charged supply settles at, if there is one.
+        _steps.Forget();
         Start(links);
-        return Close(axes, links, stresses, false, budget);
+        return Close(axes, links, stresses, true, budget);
     }
 
-    private SolveStatus Close(ReadOnlySpan<double> axes, Span<double> links, Span<double> stresses, bool accelerated, in Budget budget)
+    private SolveStatus Close(ReadOnlySpan<double> axes, Span<double> links, Span<double> stresses, bool creeping, in Budget budget)
     {
-        _acceleration.Restart();
+        var last = false;
         for (var sweep = 0; sweep < MostSweeps; sweep++)
         {
             if (budget.Cancel.IsCancellationRequested)
@@ -66,29 +72,60 @@ public sealed class SupplySolver
                 return SolveStatus.Cancelled;
             }
 
-            links.CopyTo(_before);
-            var status = Sweep(axes, links, [], budget);
+            for (var i = 0; i < _loop.Length; i++)
+            {
+                _before[i] = links[_loop[i]];
+            }
+
+            var status = Sweep(axes, links, last ? stresses : [], budget);
             if (status != SolveStatus.Solved)
             {
                 return status;
             }
 
-            if (Settled(links))
+            var residual = Residual(links);
+            if (last && residual <= LinkTolerance)
             {
-                return Sweep(axes, links, stresses, budget);
+                return SolveStatus.Solved;
             }
 
-            if (!accelerated)
+            if (creeping)
             {
                 Damp(links);
             }
-            else if (sweep < TrustedSweeps)
+            else
             {
-                _acceleration.Next(_before, links);
+                Step(links);
             }
+
+            last = residual <= (creeping ? LinkTolerance : Near);
         }
 
         return SolveStatus.OutOfBudget;
+    }
+
+    private double Residual(ReadOnlySpan<double> links)
+    {
+        var greatest = 0.0;
+        for (var i = 0; i < _loop.Length; i++)
+        {
+            _residual[i] = (links[_loop[i]] - _before[i]) / Scale(i);
+            greatest = Math.Max(greatest, Math.Abs(_residual[i]));
+        }
+
+        return greatest;
+    }
+
+    /// <summary>Links differ in size by unit; each is weighed by its own value, or by its usual one when it is near zero.</summary>
+    private double Scale(int i) => Math.Max(Math.Abs(_before[i]), Math.Max(0.5 * Math.Abs(_model.Links[_loop[i]].Start), 1e-3));
+
+    private void Step(Span<double> links)
+    {
+        var step = _steps.Next(_residual);
+        for (var i = 0; i < _loop.Length; i++)
+        {
+            links[_loop[i]] = _before[i] + step[i] * Scale(i);
+        }
     }
 
     /// <summary>First guesses of all links.</summary>
@@ -133,23 +170,10 @@ public sealed class SupplySolver
 
     private void Damp(Span<double> links)
     {
-        foreach (var i in _loop)
+        for (var i = 0; i < _loop.Length; i++)
         {
-            links[i] = _before[i] + Damping * (links[i] - _before[i]);
+            links[_loop[i]] = _before[i] + Damping * (links[_loop[i]] - _before[i]);
         }
-    }
-
-    private bool Settled(ReadOnlySpan<double> links)
-    {
-        foreach (var i in _loop)
-        {
-            if (Math.Abs(links[i] - _before[i]) > LinkTolerance * Math.Max(Math.Abs(links[i]), 1e-3))
-            {
-                return false;
-            }
-        }
-
-        return true;
     }
 
     private static bool AllFinite(ReadOnlySpan<double> values)

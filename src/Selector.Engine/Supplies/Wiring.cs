@@ -24,6 +24,13 @@ internal sealed class Wiring
         _inputs = [.. model.Stages.Select(stage => stage.Inputs.Select(Source).ToImmutableArray())];
         var first = 0;
         _firstLink = [.. model.Stages.Select(s => (first += s.Writes.Length) - s.Writes.Length)];
+        Loop = [.. Enumerable.Range(0, model.Links.Length).Where(l => !model.Links[l].IsHint && IsReadBack(l))];
+
+        bool IsReadBack(int link) => _inputs
+            .Select((inputs, stage) => (inputs, stage))
+            .Any(s => s.stage <= Writer(link) && s.inputs.Any(i => i.Kind == InputKind.Link && i.Index == link));
+
+        int Writer(int link) => _firstLink.Select((at, stage) => (at, stage)).Last(s => s.at <= link && model.Stages[s.stage].Writes.Length > 0).stage;
 
         InputSource Source(InputSpec input) => new(
             input.Id.Kind,
@@ -38,6 +45,9 @@ internal sealed class Wiring
                 : -1,
             input.Fallback ?? double.NaN);
     }
+
+    /// <summary>Links that a stage reads before, or while, they are written in a sweep: the loops run through these.</summary>
+    public ImmutableArray<int> Loop { get; }
 
     public ImmutableArray<InputSource> Inputs(int stage) => _inputs[stage];
 

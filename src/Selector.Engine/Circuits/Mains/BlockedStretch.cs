@@ -41,7 +41,7 @@ internal readonly struct BlockedStretch
 
     /// <summary>
     /// C (v - r P / v) dv = -P dt has the integral C ( (v0² - v²)/2 - r P ln(v0/v) ) = P t; Newton's method inverts it, from the
-    /// value without ESR, from which it falls steadily.
+    /// value without ESR, from which it falls steadily: a last step of 1e-7 leaves its square.
     /// </summary>
     private double ConstantPower(double tau, out double slope)
     {
@@ -54,7 +54,7 @@ internal readonly struct BlockedStretch
             var error = (_v0 * _v0 - v * v) / 2 - rise * Math.Log(_v0 / v) - power * tau / c;
             var step = error / (v - rise / v);
             v += step;
-            if (Math.Abs(step) <= 1e-13 * v)
+            if (Math.Abs(step) <= 1e-7 * v)
             {
                 break;
             }

@@ -48,6 +48,12 @@ internal struct ChargingPiece
     public readonly void At(double t, out double u, out double j)
     {
         var (sin, cos) = Math.SinCos(_omega * t);
+        At(t, sin, cos, out u, out j);
+    }
+
+    /// <summary>The same where sine and cosine of the mains are known already.</summary>
+    public readonly void At(double t, double sin, double cos, out double u, out double j)
+    {
         var tau = t - _start;
         if (!_inductive)
         {

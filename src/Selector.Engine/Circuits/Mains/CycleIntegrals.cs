@@ -4,7 +4,7 @@ namespace Selector.Engine.Circuits.Mains;
 internal struct CycleIntegrals
 {
     private const int PanelsOfPulse = 5;
-    private const int PanelsOfRest = 3;
+    private const int PanelsOfRest = 2;
 
     /// <summary>One panel more for every radian that leakage and reservoir ring in a pulse.</summary>
     private const int MostForRinging = 60;
@@ -104,9 +104,10 @@ internal struct CycleIntegrals
         for (var n = 0; n < nodes.Length; n++)
         {
             var t = start + width * (1 + nodes[n]) / 2;
-            piece.At(t, out var u, out var j);
+            var (sine, cosine) = Math.SinCos(path.Omega * t);
+            piece.At(t, sine, cosine, out var u, out var j);
             var v = piece.Terminal(u, j);
-            var sine = Add(path, t, j, v, weights[n] * width / 2);
+            Add(path, sine, cosine, j, v, weights[n] * width / 2);
             ReverseSquare += weights[n] * width / 2 * path.ReverseSquareInPulse(v, j, path.Peak * sine);
             if (detail == RectifierDetail.All)
             {
@@ -121,18 +122,17 @@ internal struct CycleIntegrals
         {
             var t = start + width * (1 + Nodes[n]) / 2;
             var v = rest.Terminal(t, out _);
-            var sine = Add(path, t, 0, v, Weights[n] * width / 2);
+            var (sine, cosine) = Math.SinCos(path.Omega * t);
+            Add(path, sine, cosine, 0, v, Weights[n] * width / 2);
             ReverseSquare += Weights[n] * width / 2 * path.ReverseSquareAtRest(v, path.Peak * sine);
             RestReverse = Math.Max(RestReverse, v - path.Peak * sine);
         }
     }
 
-    /// <summary>Adds one point; returns the sine of the mains there.</summary>
-    private double Add(in ChargingPath path, double t, double j, double v, double weight)
+    private void Add(in ChargingPath path, double sin, double cos, double j, double v, double weight)
     {
         var load = path.LoadCurrent(v);
         var capacitor = j - load;
-        var (sin, cos) = Math.SinCos(path.Omega * t);
 
         // The ripple runs at the frequency of the pulses: the mains' own for a half wave, else twice that.
         var (rippleSin, rippleCos) = path.PulsesPerPeriod == 1 ? (sin, cos) : (2 * sin * cos, 1 - 2 * sin * sin);
@@ -146,7 +146,6 @@ internal struct CycleIntegrals
         CapacitorCos += weight * capacitor * rippleCos;
         CapacitorSin += weight * capacitor * rippleSin;
         Source += weight * j * path.Peak * sin;
-        return sin;
     }
 
     private void Sample(double t, in PulseView pulse, PulseFigure reverse, double j, double v)

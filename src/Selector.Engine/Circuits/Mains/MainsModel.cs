@@ -131,7 +131,7 @@ internal sealed class MainsModel : ReservoirModel
     }
 
     private static AxisSpec Around(string id, double nominal, double tolerance) =>
-        new(id, new(nominal * (1 - tolerance), nominal * (1 + tolerance)), nominal, v => QuantityWriter.Write(v, Units.Hertz));
+        new(id, new(nominal * (1 - tolerance), nominal * (1 + tolerance)), nominal, v => QuantityWriter.Write(v, Units.Hertz)) { Probes = 0 };
 
     private static string Plain(double value) => value.ToString("0.#", System.Globalization.CultureInfo.InvariantCulture);
 }

@@ -9,11 +9,11 @@ internal ref struct PulseTrain
     public const int MostPieces = 192;
 
     /// <summary>Pieces of a pulse under a constant power; each straightens the load about its own middle.</summary>
-    private const int PiecesOfPower = 12;
+    private const int PiecesOfPower = 6;
     private const int MostPiecesOfPower = 80;
 
     /// <summary>Way of the bus over one piece, as a share of the bus, that the straightened load may go.</summary>
-    private const double WidestSwing = 0.02;
+    private const double WidestSwing = 0.04;
     private const int Probes = 24;
     private const int MostSteps = 60;
 
@@ -172,7 +172,7 @@ internal ref struct PulseTrain
         }
 
         var (jLow, jHigh) = (piece.Current(low), piece.Current(high));
-        for (var i = 0; i < MostSteps && high - low > 1e-13 * _path.Cycle; i++)
+        for (var i = 0; i < MostSteps && high - low > 1e-11 * _path.Cycle; i++)
         {
             // The false position, with the kept end's value halved so that both ends close in.
             var t = high - jHigh * (high - low) / (jHigh - jLow);
@@ -236,12 +236,12 @@ internal ref struct PulseTrain
 
             var newton = t - error / (_path.Peak * _path.Omega * Math.Cos(_path.Omega * (t - cycle)) - slope);
             var next = newton > low && newton < high ? newton : (low + high) / 2;
-            if (Math.Abs(next - t) <= 1e-14 * cycle)
+            var moved = Math.Abs(next - t);
+            t = next;
+            if (moved <= 1e-8 * cycle)
             {
                 break;
             }
-
-            t = next;
         }
 
         var bus = rest.Terminal(t, out _);

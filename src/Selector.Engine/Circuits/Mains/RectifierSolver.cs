@@ -7,7 +7,7 @@ namespace Selector.Engine.Circuits.Mains;
 public static class RectifierSolver
 {
     private const double ChargedStart = 0.85;
-    private const double Tolerance = 1e-11;
+    private const double Tolerance = 1e-9;
     private const int PlainCycles = 4_000;
 
     /// <summary>Charge into the reservoir that may be missing, as a share, before a solution is no solution.</summary>
