@@ -14,6 +14,7 @@ internal static class WebServices
             o.Providers.Add<BrotliCompressionProvider>();
             o.Providers.Add<GzipCompressionProvider>();
         });
+        services.AddHostedService<WarmUp>();
         return services.AddSheets();
     }
 
