@@ -29,5 +29,7 @@ public static class Standard
             RegulatorFamily.Spec,
             InductorFamily.Spec,
             ResistorFamily.Spec,
+            HeatSinkFamily.Spec,
+            InterfaceFamily.Spec,
         ]);
 }

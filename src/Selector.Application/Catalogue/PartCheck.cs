@@ -42,7 +42,7 @@ internal static class PartCheck
 
     /// <summary>Relations among ratings that do not hold.</summary>
     public static IEnumerable<CrossCheck> Cross(Part part) => part.Family.Checks.Where(check =>
-        check.Keys.All(part.Has) && !check.Holds([.. check.Keys.Select(k => part[k])]));
+        (check.EvenIfMissing || check.Keys.All(part.Has)) && !check.Holds([.. check.Keys.Select(k => part[k])]));
 
     /// <summary>"a", "a or b", "a, b or c", in quotation marks.</summary>
     public static string Listed(IReadOnlyList<string> words)

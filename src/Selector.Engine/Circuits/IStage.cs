@@ -58,6 +58,9 @@ public abstract class StageModel
     /// <summary>Heat that leaves parts of the stage, for the thermal stage.</summary>
     public ImmutableArray<HeatSource> Heats { get; protected init; } = [];
 
+    /// <summary>Heat of parts that have no junction: it only warms the air in the case.</summary>
+    public ImmutableArray<LossLink> OtherLosses { get; protected init; } = [];
+
     /// <summary>What is drawn, plotted, measured and warned of.</summary>
     public StageView View { get; protected init; } = StageView.Empty;
 
@@ -93,14 +96,29 @@ public abstract class StageModel
     }
 }
 
-/// <summary>A part that heats up.</summary>
+/// <summary>A part with a junction that heats up.</summary>
 /// <param name="Position">Which.</param>
 /// <param name="LossLink">Link with its loss in watts, in one part.</param>
 /// <param name="TemperatureLink">Link that the thermal stage writes: its junction temperature in °C.</param>
 /// <param name="ResistanceKey">Rating with its thermal resistance to open air in K/W.</param>
 /// <param name="LimitKey">Rating with its greatest junction temperature in °C.</param>
 /// <param name="Needs">Ratings without which the loss is only partly known.</param>
-public sealed record HeatSource(string Position, string LossLink, string TemperatureLink, string ResistanceKey, string LimitKey, params Need[] Needs);
+public sealed record HeatSource(string Position, string LossLink, string TemperatureLink, string ResistanceKey, string LimitKey, params Need[] Needs)
+{
+    /// <summary>Rating with its thermal resistance from junction to case in K/W; null for a part that cannot be bolted to a sink.</summary>
+    public string? CaseKey { get; init; }
+
+    /// <summary>Equal parts in the position.</summary>
+    public int Quantity { get; init; } = 1;
+
+    /// <summary>Link with how fast the loss grows with the junction, W/K; null where it does not.</summary>
+    public string? SlopeLink { get; init; }
+}
+
+/// <summary>Heat that warms the case.</summary>
+/// <param name="Link">Its link, W, in one part.</param>
+/// <param name="Quantity">Equal parts.</param>
+public sealed record LossLink(string Link, int Quantity = 1);
 
 /// <summary>What a stage shows besides its numbers.</summary>
 /// <param name="Cautions">Plain sentences for page and paper.</param>

@@ -56,7 +56,7 @@ public sealed record StressSpec(string Position, string Kind, string Name, Unit 
     /// <summary>A matter of fitting or not, such as the primary's voltage: it can lack, but a margin of it says nothing.</summary>
     public bool IsMatch { get; init; }
 
-    /// <summary>The temperature at which the rating is read, if it falls with temperature: the ambient unless a link is named.</summary>
+    /// <summary>The temperature at which the rating is read, if it falls with temperature: that of the air in the case, or the ambient, unless a link is named.</summary>
     public string? TemperatureLink { get; init; }
 
     /// <summary>Unique in a supply.</summary>

@@ -104,8 +104,9 @@ public sealed class CornerSearch
             push = Directions.Then(push, Push.Falls);
         }
 
-        return axis == _model.AmbientAxis && severity.FallsWithTemperature
-            ? Directions.Join(push, Push.Rises)
+        return !severity.FallsWithTemperature ? push
+            : severity.TemperatureLink >= 0 ? Directions.Join(push, _model.Directions.OfLink(severity.TemperatureLink, axis))
+            : axis == _model.AmbientAxis ? Directions.Join(push, Push.Rises)
             : push;
     }
 

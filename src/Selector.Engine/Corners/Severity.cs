@@ -21,7 +21,7 @@ public sealed class Severity
         _stress = stress;
         _spec = model.Stresses[stress].Spec;
         _ambient = model.AmbientAxis;
-        _temperatureLink = _spec.TemperatureLink is { } link ? model.Links.FindIndex(l => l.Name == link) : -1;
+        _temperatureLink = model.Links.FindIndex(l => l.Name == (_spec.TemperatureLink ?? Circuits.Thermal.Surroundings.AirLink));
         Part = fitting?.Part;
         var family = model.Registry.Family(model.Positions[model.PositionOrdinal(_spec.Position)].Family);
         var technology = Part?.Technology is { Length: > 0 } named ? named : family.Technologies[0];
@@ -65,6 +65,9 @@ public sealed class Severity
         : !Part.Has(Fall.KneeKey) ? Fall.KneeKey
         : !Part.Has(Fall.ZeroKey) ? Fall.ZeroKey
         : null;
+
+    /// <summary>Link with the temperature at which the rating is read; -1 when it is the ambient.</summary>
+    public int TemperatureLink => _temperatureLink;
 
     /// <summary>Temperature at which the rating is read, °C.</summary>
     public double Temperature(Condition at) =>

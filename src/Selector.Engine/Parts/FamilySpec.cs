@@ -40,7 +40,11 @@ public sealed record FamilySpec(string Id, string Name, string Plural, Immutable
 /// <param name="Keys">Ratings that it looks at; it is only asked when all are given.</param>
 /// <param name="Holds">True when consistent; the values come in the order of <paramref name="Keys"/>.</param>
 /// <param name="Message">What is wrong and what to do, when it is not.</param>
-public sealed record CrossCheck(ImmutableArray<string> Keys, Func<ImmutableArray<double>, bool> Holds, string Message);
+public sealed record CrossCheck(ImmutableArray<string> Keys, Func<ImmutableArray<double>, bool> Holds, string Message)
+{
+    /// <summary>Asked even when ratings are missing; they come as NaN. For data of which one or the other must be given.</summary>
+    public bool EvenIfMissing { get; init; }
+}
 
 /// <summary>How several equal parts may fill one position.</summary>
 public enum ArrangementKind

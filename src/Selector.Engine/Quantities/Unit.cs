@@ -49,6 +49,10 @@ public static class Units
     // By the SI rule kA²s is (kA)²s, a million A²s, yet data sheets mean a thousand: so no prefix, neither read nor written.
     public static readonly Unit AmpereSquaredSecond = new("A²s", "ampere squared second", UnitScale.Plain, "a2s", "A2s", "A^2s");
     public static readonly Unit Millimetre = new("mm", "millimetre", UnitScale.Plain, "mm", "mm");
+    public static readonly Unit Metre = new("m", "metre", UnitScale.Plain, "m", "m", "metre", "meter");
+    public static readonly Unit Joule = new("J", "joule", UnitScale.Prefixed, "j", "joule", "joules", "Ws");
+    public static readonly Unit WattPerKelvin = new("W/K", "watt per kelvin", UnitScale.Prefixed, "w_per_k", "W/K", "W/°C");
+    public static readonly Unit Coulomb = new("C", "coulomb", UnitScale.Prefixed, "coulomb", "C", "coulomb", "As");
     public static readonly Unit Percent = new("%", "per cent", UnitScale.Percent, "frac", "percent", "per cent", "pct");
     public static readonly Unit One = new("", "number", UnitScale.Plain, "n");
 
@@ -56,6 +60,6 @@ public static class Units
     public static ImmutableArray<Unit> All { get; } =
     [
         Volt, Ampere, Ohm, Farad, Henry, Hertz, Watt, VoltAmpere, Second, Hour, Celsius, Kelvin, KelvinPerWatt,
-        PerKelvin, VoltPerKelvin, AmpereSquaredSecond, Millimetre, Percent, One,
+        PerKelvin, VoltPerKelvin, AmpereSquaredSecond, Millimetre, Metre, Joule, WattPerKelvin, Coulomb, Percent, One,
     ];
 }

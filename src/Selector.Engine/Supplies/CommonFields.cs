@@ -31,6 +31,9 @@ public static class LinkNames
     /// <summary>Least instantaneous bus voltage, V.</summary>
     public const string BusMin = "bus.min";
 
+    /// <summary>Current from the mains, A rms.</summary>
+    public const string MainsCurrent = "mains.current";
+
     /// <summary>Power that the regulator takes from the bus, W.</summary>
     public const string RegulatorPower = "regulator.input-power";
 
@@ -48,6 +51,9 @@ public static class LinkNames
 
     /// <summary>Loss in one part of a position, W.</summary>
     public static string Loss(string position) => $"loss.{position}";
+
+    /// <summary>How fast the loss in one part of a position grows with its junction, W/K.</summary>
+    public static string LossSlope(string position) => $"loss-slope.{position}";
 
     /// <summary>Junction or winding temperature of a position, °C.</summary>
     public static string Temperature(string position) => $"temperature.{position}";

@@ -44,6 +44,9 @@ internal sealed class Directions
     /// <summary>Direction of a stress in an axis; None when the axis does not bear on it.</summary>
     public Push OfStress(int stress, int axis) => _stresses[stress, axis];
 
+    /// <summary>Direction of a link in an axis.</summary>
+    public Push OfLink(int link, int axis) => _links[link, axis];
+
     /// <summary>Ratings on which the value of a stress rests, by position and column.</summary>
     public IReadOnlySet<(int Position, int Column)> RatingsOf(int stress) => _ratings[stress];
 

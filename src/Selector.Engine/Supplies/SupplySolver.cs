@@ -209,14 +209,11 @@ public sealed class SupplySolver
             return rating;
         }
 
-        if (!double.IsNaN(source.Fallback))
-        {
-            return source.Fallback;
-        }
-
         var key = _model.FamilyOf(position).Ratings[source.Column].Key;
-        return position.StandIn.TryGetValue(key, out var standIn)
-            ? standIn
+        var standIn = position.StandIn.GetValueOrDefault(key, double.NaN);
+        return fitting is null && !double.IsNaN(standIn) ? standIn
+            : !double.IsNaN(source.Fallback) ? source.Fallback
+            : !double.IsNaN(standIn) ? standIn
             : throw new InvalidOperationException($"{position.Id} has neither a fallback nor a stand-in for '{key}'.");
     }
 }

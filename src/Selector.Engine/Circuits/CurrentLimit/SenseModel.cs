@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using Selector.Engine.Circuits.Thermal;
 using Selector.Engine.Parts.Families;
 using Selector.Engine.Quantities;
 using Selector.Engine.Supplies;
@@ -21,7 +22,8 @@ internal sealed class SenseModel : StageModel
     private readonly double _target;
     private readonly double _span;
     private readonly int _current, _count, _resistance, _tolerance, _drift;
-    private readonly int _series;
+    private readonly int _series, _loss, _place, _air;
+    private readonly double _localRise;
     private readonly int _power, _voltage, _error;
 
     public SenseModel(RequirementValues r)
@@ -35,14 +37,20 @@ internal sealed class SenseModel : StageModel
         _drift = Read(Drift, 0);
         ImmutableArray<Dependence> on = [.. Rises("loss and drop grow with current", Current)];
         _series = Write(new(LinkNames.SeriesResistance, Units.Ohm, _target, [.. Rises("it is the bank", Resistance), .. Falls("in parallel", Count)]) { Others = Push.None });
+        var air = Surroundings.Air(r);
+        _air = Read(air);
+        _localRise = Surroundings.LocalRise(r);
+        _loss = Write(new(LinkNames.Loss(R4), Units.Watt, 0.1, [.. on, .. Rises("P = I² R", Resistance), .. Falls("in parallel", Count)]) { Others = Push.None });
+        _place = Write(new(LinkNames.Temperature(R4), Units.Celsius, 45, [.. Rises("it is the air around it", air)]) { Others = Push.None });
+        OtherLosses = [new(LinkNames.Loss(R4))];
         _power = Stress(new(R4, "power", "power of the worst single resistor", Units.Watt, Side.Ceiling, new Bound.Rating(ResistorFamily.Power),
             "P = I² R over all corners of n tolerances")
-            { On = on, Needs = [new Need(R4, ResistorFamily.Drift, "without drift over temperature")] });
+            { On = [.. on, .. NotAir(air)], Needs = [new Need(R4, ResistorFamily.Drift, "without drift over temperature")], TemperatureLink = LinkNames.Temperature(R4) });
         _voltage = Stress(new(R4, "voltage", "working voltage", Units.Volt, Side.Ceiling, new Bound.Rating(ResistorFamily.Voltage), "V = I R, bank at its greatest")
-            { On = on });
+            { On = [.. on, .. NotAir(air)] });
         _error = Stress(new(R4, "resistance-error", "error of the whole bank", Units.Percent, Side.Ceiling, new Bound.Required(r[SenseStage.Accuracy], SenseStage.Accuracy),
             "e = |R / n (1 ± t) − R_asked| / R_asked, t with drift")
-            { On = [.. None("a ratio of resistances", Current)], Needs = [new Need(R4, ResistorFamily.Drift, "without drift over temperature")] });
+            { On = [.. None("a ratio of resistances", Current, air)], Needs = [new Need(R4, ResistorFamily.Drift, "without drift over temperature")] });
         Positions =
         [
             new(R4, "sense bank", ResistorFamily.Id, 1, ImmutableDictionary<string, double>.Empty
@@ -54,16 +62,19 @@ internal sealed class SenseModel : StageModel
         NotAssessed =
         [
             new(R4, "pulse when C2 discharges into a short"),
-            new(R4, "local rise of the air around the bank"),
             new("U2", "difference amplifier and limit loop: reading and limit error"),
         ];
     }
+
+    private static IEnumerable<Dependence> NotAir(InputId air) => None("drift is taken over the whole span of the ambient", air);
 
     public override SolveStatus Solve(ReadOnlySpan<double> inputs, Span<double> links, Span<double> stresses, in Budget budget)
     {
         var n = (int)inputs[_count];
         var each = inputs[_resistance];
         links[_series] = each / n;
+        links[_loss] = inputs[_current] * inputs[_current] * each / n;
+        links[_place] = inputs[_air] + _localRise;
         if (stresses.IsEmpty)
         {
             return SolveStatus.Solved;

@@ -1,3 +1,4 @@
+using Selector.Engine.Circuits.Thermal;
 using Selector.Engine.Parts.Families;
 using Selector.Engine.Supplies;
 
@@ -11,33 +12,60 @@ internal sealed class MainsInputs
     /// <summary>Winding limit assumed where the transformer does not state its class: class A in normal use, the lowest (IEC 61558-1, from memory).</summary>
     private const double LeastWindingLimit = 100;
 
+    /// <summary>Air in which a transformer's rise is rated, °C. Common practice, no source.</summary>
+    private const double RatedAir = 40;
+
+    /// <summary>Copper's share of the heat at rated load. Common practice, no source.</summary>
+    private const double CopperShare = 2.0 / 3;
+
+    private readonly double _nominal;
+    private readonly double _nominalFrequency;
+    private readonly double _impedance;
+    private readonly double _low;
+    private readonly double _high;
     private readonly int _mains;
     private readonly int _frequency;
     private readonly int _winding;
-    private readonly int _ambient;
-    private readonly int _noLoad;
-    private readonly int _resistance;
-    private readonly int _resistanceAt;
-    private readonly int _leakage;
+    private readonly int _air;
+    private readonly int _firstOfTransformer;
+    private readonly int _tolerance;
+    private readonly int _magnetising;
     private readonly int _windingMax;
+    private readonly int _windingRise;
+    private readonly int _windingTemperature;
     private readonly int _threshold;
     private readonly int _drift;
     private readonly int _slope;
     private readonly int _junction;
 
-    public MainsInputs(Func<InputId, double?, int> read, FrontEndTopology topology)
+    public MainsInputs(Func<InputId, double?, int> read, RequirementValues r, FrontEndTopology topology)
     {
+        _nominal = r[MainsStage.Voltage];
+        _nominalFrequency = r[MainsStage.Frequency];
+        _impedance = r[MainsStage.Impedance];
+        (_low, _high) = (1 - r[MainsStage.Low], 1 + r[MainsStage.High]);
         _mains = read(InputId.Axis(MainsStage.MainsAxis), null);
         _frequency = read(InputId.Axis(MainsStage.FrequencyAxis), null);
         _winding = read(InputId.Axis(MainsStage.WindingAxis), null);
-        _ambient = read(InputId.Axis(CommonFields.AmbientAxis), null);
-        Primary = read(InputId.Column(T1, TransformerFamily.Primary), null);
+        _air = read(Surroundings.Air(r), null);
+        Primary = _firstOfTransformer = read(InputId.Column(T1, TransformerFamily.Primary), null);
         Halves = read(InputId.Column(T1, TransformerFamily.Halves), null);
-        _noLoad = read(InputId.Column(T1, TransformerFamily.NoLoad), null);
-        _resistance = read(InputId.Column(T1, TransformerFamily.Resistance), null);
-        _resistanceAt = read(InputId.Column(T1, TransformerFamily.ResistanceAt), null);
-        _leakage = read(InputId.Column(T1, TransformerFamily.Leakage), 0);
+        read(InputId.Column(T1, TransformerFamily.NoLoad), 0);
+        read(InputId.Column(T1, TransformerFamily.Resistance), 0);
+        read(InputId.Column(T1, TransformerFamily.ResistanceAt), null);
+        read(InputId.Column(T1, TransformerFamily.Leakage), 0);
+        read(InputId.Column(T1, TransformerFamily.Rated), 0);
+        read(InputId.Column(T1, TransformerFamily.Power), 0);
+        read(InputId.Column(T1, TransformerFamily.Current), 0);
+        read(InputId.Column(T1, TransformerFamily.Regulation), 0);
+        read(InputId.Column(T1, TransformerFamily.ShortCircuit), 0);
+        read(InputId.Column(T1, TransformerFamily.PrimaryResistance), 0);
+        _tolerance = read(InputId.Column(T1, TransformerFamily.Tolerance), 0);
+        _magnetising = read(InputId.Column(T1, TransformerFamily.Magnetising), 0);
+        FrequencyMin = read(InputId.Column(T1, TransformerFamily.FrequencyMin), _nominalFrequency);
         _windingMax = read(InputId.Column(T1, TransformerFamily.WindingMax), LeastWindingLimit);
+        _windingRise = read(InputId.Column(T1, TransformerFamily.WindingRise), 0);
+        _windingTemperature = read(InputId.Link(LinkNames.Temperature(T1)), null);
         _threshold = read(InputId.Column(topology.Rectifier, RectifierRatings.Threshold), null);
         _drift = read(InputId.Column(topology.Rectifier, RectifierRatings.ThresholdDrift), 0);
         _slope = read(InputId.Column(topology.Rectifier, RectifierRatings.Slope), null);
@@ -51,28 +79,86 @@ internal sealed class MainsInputs
     /// <summary>Place of the number of secondary halves.</summary>
     public int Halves { get; }
 
+    /// <summary>Place of the lowest frequency for which it is built.</summary>
+    public int FrequencyMin { get; }
+
     /// <summary>Place of the basis of a bridge's current rating; -1 for single diodes.</summary>
     public int Basis { get; }
 
-    /// <summary>The circuit at a condition.</summary>
-    public RectifierCase Circuit(ReadOnlySpan<double> inputs, FrontEndTopology topology, double nominal, double capacitance, double esr, double power)
+    public double Frequency(ReadOnlySpan<double> x) => x[_frequency];
+
+    /// <summary>Mains voltage, V rms.</summary>
+    public double Voltage(ReadOnlySpan<double> x) => x[_mains] * _nominal;
+
+    /// <summary>Voltage over frequency, as a share of that for which the core is rated.</summary>
+    public double Flux(ReadOnlySpan<double> x, double ratedFrequency) =>
+        Voltage(x) / x[_frequency] / (x[Primary] / ratedFrequency);
+
+    public double Drift(ReadOnlySpan<double> x) => x[_drift];
+
+    public Transformer Transformer(ReadOnlySpan<double> x)
     {
-        var temperature = inputs[_ambient] + inputs[_winding] * Math.Max(0, inputs[_windingMax] - inputs[_ambient]);
-        var resistance = Copper.At(inputs[_resistance], inputs[_resistanceAt], temperature);
+        var t = x[_firstOfTransformer..];
+        return new Transformer(t[0], t[1], t[2], t[3], t[4], t[5], t[6], t[7], t[8], t[9], t[10], t[11], _nominalFrequency);
+    }
+
+    /// <summary>
+    /// The emf's factor: mains over nominal, and the transformer's own tolerance with it. Both multiply the same emf and nothing else
+    /// of the secondary, so that the worst of both together is the worst of their product.
+    /// </summary>
+    public double EmfFactor(ReadOnlySpan<double> x)
+    {
+        var place = _high > _low ? 2 * (x[_mains] - _low) / (_high - _low) - 1 : 0;
+        return x[_mains] * _nominal / x[Primary] * (1 + x[_tolerance] * place);
+    }
+
+    /// <summary>The circuit at a condition. A cold winding is on stiff mains, a hot one behind the mains impedance.</summary>
+    public RectifierCase Circuit(ReadOnlySpan<double> x, in Transformer t, FrontEndTopology topology, double capacitance, double esr, double power)
+    {
+        var temperature = x[_air] + x[_winding] * Math.Max(0, x[_windingTemperature] - x[_air]);
 
         // A single winding with two halves in series feeds a bridge or a half wave with both.
-        var halves = topology.Halves == 1 ? inputs[Halves] : 1;
+        var whole = topology.Halves == 1;
+        var halves = whole ? x[Halves] : 1;
+        var turns = t.Turns * halves;
+        var resistance = whole ? t.SeriesResistance : t.HalfResistance;
         return new RectifierCase(
             topology.Arrangement,
-            inputs[_frequency],
-            inputs[_noLoad] * halves * inputs[_mains] * nominal / inputs[Primary],
-            resistance * halves,
-            inputs[_leakage] * halves,
-            Math.Max(0, inputs[_threshold] + inputs[_drift] * (inputs[_junction] - 25)),
-            inputs[_slope],
+            x[_frequency],
+            t.Voltage * halves * EmfFactor(x),
+            Copper.At(resistance, t.MeasuredAt, temperature) + x[_winding] * _impedance * turns * turns,
+            t.HalfLeakage * halves * (t.LeakageIsKnown ? 1 : x[_winding]),
+            Math.Max(0, x[_threshold] + x[_drift] * (x[_junction] - 25)),
+            x[_slope],
             capacitance,
             esr,
             LoadKind.Power,
             power);
+    }
+
+    /// <summary>Heat in core and windings, W, and the winding's temperature once it has settled, °C.</summary>
+    /// <param name="x">Inputs.</param>
+    /// <param name="t">The transformer.</param>
+    /// <param name="copper">Loss in the windings as solved, W.</param>
+    public (double Loss, double Temperature) Heat(ReadOnlySpan<double> x, in Transformer t, double copper)
+    {
+        var limit = x[_windingMax];
+        var rise = x[_windingRise] > 0 ? x[_windingRise] : Math.Max(1, limit - RatedAir);
+        var rated = Copper.At(t.SeriesResistance, t.MeasuredAt, limit) * t.Current * t.Current;
+        if (!(rated > 0))
+        {
+            return (copper, limit);
+        }
+
+        var core = (1 / CopperShare - 1) * rated * x[_mains] * x[_mains];
+        return (copper + core, x[_air] + rise * CopperShare * (copper + core) / rated);
+    }
+
+    /// <summary>Rms current in the primary: the load's by the turns, and the magnetising current at right angles to it, A.</summary>
+    public double PrimaryCurrent(ReadOnlySpan<double> x, in Transformer t, FrontEndTopology topology, double secondary)
+    {
+        var load = topology.Halves == 1 ? t.Turns * x[Halves] * secondary : t.Turns * Math.Sqrt(2) * secondary;
+        var magnetising = x[_magnetising] * x[_mains];
+        return Math.Sqrt(load * load + magnetising * magnetising);
     }
 }

@@ -18,8 +18,6 @@ internal sealed class MainsModel : ReservoirModel
     private static readonly InputId Winding = InputId.Axis(MainsStage.WindingAxis);
 
     private readonly FrontEndTopology _topology;
-    private readonly double _nominal;
-    private readonly double _nominalFrequency;
     private readonly MainsInputs _in;
     private readonly int _mean;
     private readonly int _max;
@@ -27,6 +25,7 @@ internal sealed class MainsModel : ReservoirModel
     private readonly int _loss;
     private readonly int _start;
     private readonly int _slope;
+    private readonly int _current, _winding, _transformerLoss, _slopeOfLoss;
     private readonly MainsStresses _stress;
 
     public MainsModel(RequirementValues r)
@@ -39,9 +38,7 @@ internal sealed class MainsModel : ReservoirModel
             topology.PulsesPerCycle * r[MainsStage.Frequency] * (1 - r[MainsStage.FrequencyTolerance]))
     {
         _topology = topology;
-        _nominal = r[MainsStage.Voltage];
-        _nominalFrequency = r[MainsStage.Frequency];
-        _in = new MainsInputs(Read, topology);
+        _in = new MainsInputs(Read, r, topology);
         var guess = MainsStandIn.Bus(r);
         _mean = Write(new(LinkNames.BusMean, Units.Volt, guess, [.. BusOn]));
         _max = Write(new(LinkNames.BusMax, Units.Volt, guess, [.. BusOn]));
@@ -49,7 +46,12 @@ internal sealed class MainsModel : ReservoirModel
         _loss = Write(new(LinkNames.Loss(topology.Rectifier), Units.Watt, 0.5, [.. MainsStresses.CurrentOn(topology)]));
         _start = Write(new("rectifier.start", Units.Volt, 0) { Others = Push.None, IsHint = true });
         _slope = Write(new("rectifier.slope", Units.One, 0) { Others = Push.None, IsHint = true });
-        _stress = new MainsStresses(Stress, topology, _nominal, _nominalFrequency, BusOn);
+        _current = Write(new(LinkNames.MainsCurrent, Units.Ampere, 0.1, [.. MainsStresses.CurrentOn(topology)]));
+        _winding = Write(new(LinkNames.Temperature(T1), Units.Celsius, 60, [.. MainsStresses.CurrentOn(topology)]));
+        _transformerLoss = Write(new(LinkNames.Loss(T1), Units.Watt, 1, [.. MainsStresses.CurrentOn(topology)]));
+        _slopeOfLoss = Write(new(LinkNames.LossSlope(topology.Rectifier), Units.WattPerKelvin, 0, [.. MainsStresses.CurrentOn(topology)]));
+        OtherLosses = [new(LinkNames.Loss(T1))];
+        _stress = new MainsStresses(Stress, topology, r, BusOn);
         Axes =
         [
             new(MainsStage.MainsAxis, new(1 - r[MainsStage.Low], 1 + r[MainsStage.High]), 1, MainsWords) { Probes = 3 },
@@ -69,7 +71,10 @@ internal sealed class MainsModel : ReservoirModel
         Heats =
         [
             new(topology.Rectifier, LinkNames.Loss(topology.Rectifier), LinkNames.Temperature(topology.Rectifier),
-                RectifierRatings.Cooling, RectifierRatings.JunctionMax),
+                RectifierRatings.Cooling, RectifierRatings.JunctionMax)
+            {
+                CaseKey = RectifierRatings.CaseCooling, Quantity = topology.Quantity, SlopeLink = LinkNames.LossSlope(topology.Rectifier),
+            },
         ];
         // Against the public tables: constant power straightened over pieces of 2 % of the bus.
         Error = 1e-4;
@@ -88,14 +93,15 @@ internal sealed class MainsModel : ReservoirModel
     [
         .. Rises("the bus follows the secondary", Mains),
         .. Falls("more power drops more in winding and diodes", InputId.Link(LinkNames.RegulatorPower)),
-        .. Falls("a hot winding drops more", Winding),
+        .. Falls("a hot winding drops more, and has the mains impedance before it", Winding),
         .. None("the rectifier sees only the mean power", InputId.Link(LinkNames.RegulatorRipple), InputId.Link(LinkNames.RegulatorFrequency)),
         .. None("a weight of the ripple rating only", [.. FrequencyMultiplier.Keys.Select(k => InputId.Column(C1, k))]),
     ];
 
     public override SolveStatus Solve(ReadOnlySpan<double> inputs, Span<double> links, Span<double> stresses, in Budget budget)
     {
-        var circuit = _in.Circuit(inputs, _topology, _nominal, CapacitanceAt(inputs), EsrAt(inputs), inputs[Power]);
+        var transformer = _in.Transformer(inputs);
+        var circuit = _in.Circuit(inputs, transformer, _topology, CapacitanceAt(inputs), EsrAt(inputs), inputs[Power]);
         var status = RectifierSolver.Solve(
             circuit, budget, new RectifierStart(links[_start], links[_slope]), stresses.IsEmpty ? RectifierDetail.Loop : RectifierDetail.All, out var s);
         if (status != SolveStatus.Solved)
@@ -107,13 +113,16 @@ internal sealed class MainsModel : ReservoirModel
         links[_slope] = double.IsFinite(s.Next.Slope) ? s.Next.Slope : 0;
         links[_mean] = s.BusMean;
         links[_loss] = s.DiodeLoss * _topology.DiodesInPart;
+        links[_current] = _in.PrimaryCurrent(inputs, transformer, _topology, s.SecondaryRms);
+        (links[_transformerLoss], links[_winding]) = _in.Heat(inputs, transformer, s.WindingLoss);
+        links[_slopeOfLoss] = _in.Drift(inputs) * s.DiodeAverage * _topology.DiodesInPart;
         if (!stresses.IsEmpty)
         {
             // No loop runs through the extremes of the bus: they are only asked for once the loops are closed.
             links[_max] = s.BusMax;
             links[_min] = s.BusMin;
             WriteReservoir(inputs, stresses, s.BusMax, s.CapacitorRms, _topology.PulsesPerCycle * circuit.Frequency);
-            _stress.Write(inputs, stresses, _in, s);
+            _stress.Write(inputs, stresses, _in, s, links[_winding]);
         }
 
         return SolveStatus.Solved;

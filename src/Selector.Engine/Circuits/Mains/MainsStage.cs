@@ -13,6 +13,7 @@ public sealed class MainsStage : IStage
     public const string High = "mains.high";
     public const string Frequency = "mains.frequency";
     public const string FrequencyTolerance = "mains.frequency-tolerance";
+    public const string Impedance = "mains.impedance";
     public const string FrontEnd = "front-end";
     public const string BridgePart = "bridge";
     public const string BridgeDiodes = "bridge-diodes";
@@ -35,6 +36,7 @@ public sealed class MainsStage : IStage
         new(High, "Mains, above", Units.Percent, new(0, 0.5), "10 %", "How far the mains may rise above nominal.") { Group = "Source", Shown = Shown },
         new(Frequency, "Frequency", Units.Hertz, new(15, 1000), "50 Hz", "Nominal mains frequency.") { Group = "Source", Shown = Shown },
         new(FrequencyTolerance, "Frequency tolerance", Units.Percent, new(0, 0.2), "1 %", "Either way.") { Group = "Source", Shown = Shown },
+        new(Impedance, "Mains impedance", Units.Ohm, new(0, 100), "0.5 Ω", "Of the line up to the inlet: it deepens the valley; for peaks and at switch-on it counts as none.") { Group = "Source", Shown = Shown },
         new(FrontEnd, "Front end", Units.One, default, BridgePart, "How the secondary is rectified.")
         {
             Group = "Source", Shown = Shown,

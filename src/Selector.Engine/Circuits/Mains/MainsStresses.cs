@@ -19,13 +19,14 @@ internal sealed class MainsStresses
     private readonly int _reverse;
     private readonly int _average;
     private readonly int _peak;
+    private readonly int _winding, _flux, _direct;
     private readonly double _nominal;
     private readonly double _nominalFrequency;
 
-    public MainsStresses(Func<StressSpec, int> stress, FrontEndTopology topology, double nominal, double nominalFrequency, ImmutableArray<Dependence> busOn)
+    public MainsStresses(Func<StressSpec, int> stress, FrontEndTopology topology, RequirementValues r, ImmutableArray<Dependence> busOn)
     {
-        _nominal = nominal;
-        _nominalFrequency = nominalFrequency;
+        _nominal = r[MainsStage.Voltage];
+        _nominalFrequency = r[MainsStage.Frequency];
         var d = topology.Rectifier;
         _secondary = stress(new(T1, "secondary-current", "secondary current, rms", Units.Ampere, Side.Ceiling, new Bound.Rating(TransformerFamily.Current), "I = √( mean of i² ) of the solved pulses") { On = CurrentOn(topology) });
         _primary = stress(new(T1, "primary-voltage", "nominal mains on the primary", Units.Volt, Side.Ceiling, new Bound.Limit(TransformerFamily.Primary), "V = nominal mains") { Others = Push.None, IsMatch = true });
@@ -36,7 +37,22 @@ internal sealed class MainsStresses
             Others = Push.None,
             IsMatch = true,
         });
-        _reverse = stress(new(d, "reverse-voltage", "reverse voltage", Units.Volt, Side.Ceiling, new Bound.Rating(RectifierRatings.Reverse), topology.Arrangement == RectifierArrangement.Bridge
+        _winding = stress(new(T1, "winding-temperature", "winding", Units.Celsius, Side.Temperature, new Bound.Rating(TransformerFamily.WindingMax),
+            "T = T_air + ΔT_rated (P_copper + P_core) / P_rated, two thirds of it in the copper at rated load")
+            { On = CurrentOn(topology), Needs = [new Need(T1, TransformerFamily.Current, "without its rated load") { Lacking = part => !part.Has(TransformerFamily.Current) && !part.Has(TransformerFamily.Power) }] });
+        _flux = stress(new(T1, "volt-seconds", "volt-seconds over rated", Units.Percent, Side.Ceiling, new Bound.Limit(TransformerFamily.FluxMax), "φ = (V / f) / (V_rated / f_rated)")
+        {
+            On =
+            [
+                .. Rises("it is the mains voltage", InputId.Axis(MainsStage.MainsAxis)), .. Falls("a longer half-wave", InputId.Axis(MainsStage.FrequencyAxis)),
+                new Dependence(InputId.Column(T1, TransformerFamily.Primary), Push.Falls, "rated for more"),
+            ],
+            Others = Push.None,
+            Needs = [new Need(T1, TransformerFamily.FrequencyMin, "taken at the nominal frequency")],
+        });
+        _direct = topology.Arrangement != RectifierArrangement.HalfWave ? -1 : stress(new(T1, "direct-current", "direct current through the core", Units.Ampere, Side.Ceiling,
+            new Bound.Limit(TransformerFamily.DirectMax), "I = mean current of the half wave, all in one direction") { On = CurrentOn(topology) });
+                _reverse = stress(new(d, "reverse-voltage", "reverse voltage", Units.Volt, Side.Ceiling, new Bound.Rating(RectifierRatings.Reverse), topology.Arrangement == RectifierArrangement.Bridge
             ? "V = greatest voltage across a blocking diode of the bridge" : "V = secondary peak + bus") { On = busOn });
         _average = stress(new(d, "average-current", topology.DiodesInPart > 1 ? "average current, as rated" : "average current", Units.Ampere, Side.Ceiling, new Bound.Rating(RectifierRatings.Average), "I = mean of the diode's pulses; twice that where the part is rated for its DC output") { On = CurrentOn(topology) });
         _peak = stress(new(d, "repetitive-peak", "repetitive peak current", Units.Ampere, Side.Ceiling, new Bound.Rating(RectifierRatings.Peak), "I = top of the solved pulse") { On = CurrentOn(topology) });
@@ -47,16 +63,23 @@ internal sealed class MainsStresses
     [
         .. Rises("more power needs more current", InputId.Link(LinkNames.RegulatorPower)),
         .. None("the rectifier sees only the mean power", InputId.Link(LinkNames.RegulatorRipple), InputId.Link(LinkNames.RegulatorFrequency)),
-        .. None("around the loop of loss and temperature, whose gain is below one", InputId.Link(LinkNames.Temperature(topology.Rectifier))),
+        .. None("around the loop of loss and temperature, whose gain is below one", InputId.Link(LinkNames.Temperature(topology.Rectifier)), InputId.Link(LinkNames.Temperature(T1))),
         .. None("a weight of the reservoir's rating only", [.. FrequencyMultiplier.Keys.Select(k => InputId.Column("C1", k))]),
     ];
 
-    public void Write(ReadOnlySpan<double> inputs, Span<double> stresses, MainsInputs places, in RectifierSolution s)
+    public void Write(ReadOnlySpan<double> inputs, Span<double> stresses, MainsInputs places, in RectifierSolution s, double winding)
     {
         stresses[_secondary] = s.SecondaryRms;
         stresses[_primary] = _nominal;
         stresses[_frequency] = _nominalFrequency;
         stresses[_halves] = inputs[places.Halves];
+        stresses[_winding] = winding;
+        stresses[_flux] = places.Flux(inputs, inputs[places.FrequencyMin]);
+        if (_direct >= 0)
+        {
+            stresses[_direct] = s.DiodeAverage;
+        }
+
         stresses[_reverse] = s.DiodeReversePeak;
         stresses[_average] = places.Basis >= 0 && inputs[places.Basis] == BridgeFamily.BasisOutput ? 2 * s.DiodeAverage : s.DiodeAverage;
         stresses[_peak] = s.DiodePeak;

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using Selector.Engine.Circuits.Thermal;
 using Selector.Engine.Parts;
 using Selector.Engine.Parts.Families;
 using Selector.Engine.Quantities;
@@ -24,7 +25,8 @@ public abstract class ReservoirModel : StageModel
     private readonly int _voltage;
     private readonly int _ripple;
     private readonly int _temperature;
-    private readonly int _ambient;
+    private readonly int _air;
+    private readonly double _localRise;
 
     protected ReservoirModel(RequirementValues r, string lowestKey, double lowestFrequency)
     {
@@ -34,7 +36,9 @@ public abstract class ReservoirModel : StageModel
         _esr = Read(InputId.Column(C1, CapacitorFamily.EsrLow));
         _place = Read(InputId.Axis(ReservoirCapacitor.CapacitanceAxis(C1)));
         _esrPlace = Read(InputId.Axis(ReservoirCapacitor.EsrAxis(C1)));
-        _ambient = Read(InputId.Axis(CommonFields.AmbientAxis));
+        var air = Surroundings.Air(r);
+        _air = Read(air);
+        _localRise = Surroundings.LocalRise(r);
         Power = Read(InputId.Link(LinkNames.RegulatorPower));
         RippleIn = Read(InputId.Link(LinkNames.RegulatorRipple));
         FrequencyIn = Read(InputId.Link(LinkNames.RegulatorFrequency));
@@ -55,9 +59,9 @@ public abstract class ReservoirModel : StageModel
             On = RippleOn,
             Others = Others,
         });
-        _temperature = Stress(new(C1, "temperature", "air at its place", Units.Celsius, Side.Temperature, new Bound.Rating(CapacitorFamily.TemperatureMax), "T = ambient")
+        _temperature = Stress(new(C1, "temperature", "air at its place", Units.Celsius, Side.Temperature, new Bound.Rating(CapacitorFamily.TemperatureMax), "T = T_air + local rise")
         {
-            On = [.. Rises("it is the ambient itself", InputId.Axis(CommonFields.AmbientAxis))],
+            On = [.. Rises("it is the air around it", air)],
             Others = Push.None,
         });
     }
@@ -97,6 +101,6 @@ public abstract class ReservoirModel : StageModel
         var table = inputs.Slice(_firstMultiplier, FrequencyMultiplier.Keys.Length);
         stresses[_voltage] = busMax;
         stresses[_ripple] = RippleWeight.Equivalent(table, lowRipple, lowFrequency, inputs[RippleIn], inputs[FrequencyIn]);
-        stresses[_temperature] = inputs[_ambient];
+        stresses[_temperature] = inputs[_air] + _localRise;
     }
 }

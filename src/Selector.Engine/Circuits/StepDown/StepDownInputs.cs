@@ -1,4 +1,5 @@
 using Selector.Engine.Circuits.Reservoir;
+using Selector.Engine.Circuits.Thermal;
 using Selector.Engine.Parts;
 using Selector.Engine.Parts.Families;
 using Selector.Engine.Supplies;
@@ -17,9 +18,9 @@ internal sealed class StepDownInputs
     private readonly int _inductance, _inductanceTolerance, _coil, _coilRms, _coilRise, _inductancePlace;
     private readonly int _capacitance, _capacitanceTolerance, _esr, _capacitancePlace, _esrPlace, _firstMultiplier;
     private readonly int _busMean, _busMin, _busMax, _series, _switchTemperature, _diodeTemperature, _coilTemperature;
-    private readonly int _load, _short, _ambient;
+    private readonly int _load, _short, _air;
 
-    public StepDownInputs(Func<InputId, double?, int> read)
+    public StepDownInputs(Func<InputId, double?, int> read, RequirementValues r)
     {
         int Column(string position, string key, double? fallback = null) => read(InputId.Column(position, key), fallback);
         int Link(string name) => read(InputId.Link(name), null);
@@ -64,7 +65,7 @@ internal sealed class StepDownInputs
         _coilTemperature = Link(LinkNames.Temperature(L1));
         _load = Axis(CommonFields.LoadAxis);
         _short = Axis(CommonFields.ShortAxis);
-        _ambient = Axis(CommonFields.AmbientAxis);
+        _air = read(Surroundings.Air(r), null);
     }
 
     public double BusMean(ReadOnlySpan<double> x) => x[_busMean];
@@ -75,7 +76,7 @@ internal sealed class StepDownInputs
 
     public double Load(ReadOnlySpan<double> x) => x[_load];
 
-    public double Ambient(ReadOnlySpan<double> x) => x[_ambient];
+    public double Air(ReadOnlySpan<double> x) => x[_air];
 
     public bool Shorted(ReadOnlySpan<double> x) => x[_short] > 0.5;
 
@@ -116,7 +117,7 @@ internal sealed class StepDownInputs
 
     /// <summary>Coil temperature by the maker's rise at rated current: the rise goes with the square of the current, °C.</summary>
     public double CoilTemperature(ReadOnlySpan<double> x, double rms) =>
-        x[_ambient] + (x[_coilRms] > 0 ? x[_coilRise] * rms * rms / (x[_coilRms] * x[_coilRms]) : 0);
+        x[_air] + (x[_coilRms] > 0 ? x[_coilRise] * rms * rms / (x[_coilRms] * x[_coilRms]) : 0);
 
     /// <summary>Ripple current of C2 as one at the frequency of its rating, A.</summary>
     public double WeightedRipple(ReadOnlySpan<double> x, double rms) =>

@@ -25,7 +25,7 @@ internal sealed class StepDownModel : StageModel
     {
         _output = r[CommonFields.OutputVoltage];
         _full = r[CommonFields.LoadFull];
-        _in = new StepDownInputs(Read);
+        _in = new StepDownInputs(Read, r);
         _power = Write(new(LinkNames.RegulatorPower, Units.Watt, 0.1 * _output * _full,
             [.. Rises("more load, more power", Load), .. OutputCapacitorHardly, .. BusLoop, .. Heat]));
         _ripple = Write(new(LinkNames.RegulatorRipple, Units.Ampere, _full / 2));

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using Selector.Engine.Circuits.Reservoir;
+using Selector.Engine.Circuits.Thermal;
 using Selector.Engine.Parts.Families;
 using Selector.Engine.Quantities;
 using Selector.Engine.Supplies;
@@ -17,7 +18,6 @@ internal sealed class StepDownStresses
     private static readonly InputId BusMax = InputId.Link(LinkNames.BusMax);
     private static readonly InputId BusMin = InputId.Link(LinkNames.BusMin);
     private static readonly InputId BusMean = InputId.Link(LinkNames.BusMean);
-    private static readonly InputId Ambient = InputId.Axis(CommonFields.AmbientAxis);
 
     private readonly int _input, _lockOut, _duty, _onTime, _output, _outputLow, _outputHigh, _switch;
     private readonly int _reverse, _average, _peak;
@@ -56,8 +56,8 @@ internal sealed class StepDownStresses
         _ripple = stress(new(C2, "ripple-current", "ripple current, weighted", Units.Ampere, Side.Ceiling, new Bound.Rating(CapacitorFamily.Ripple), "I = I_C / m(f_sw)")
             { Needs = [ReservoirCapacitor.RippleTable(C2, "multiplier_10k", 1e4)], On = [.. Ripple, .. StepDownModel.OutputCapacitorHardly] });
         _outputRipple = stress(new(C2, "output-ripple", "output ripple, peak to peak", Units.Volt, Side.Ceiling, new Bound.Required(r[CommonFields.OutputRipple], CommonFields.OutputRipple), "ΔV at the terminals of C2, exact") { On = Ripple });
-        _temperature = stress(new(C2, "temperature", "air at its place", Units.Celsius, Side.Temperature, new Bound.Rating(CapacitorFamily.TemperatureMax), "T = ambient")
-            { On = [.. Rises("it is the ambient itself", Ambient)], Others = Push.None });
+        _temperature = stress(new(C2, "temperature", "air at its place", Units.Celsius, Side.Temperature, new Bound.Rating(CapacitorFamily.TemperatureMax), "T = T_air")
+            { On = [.. Rises("it is the air around it", Surroundings.Air(r))], Others = Push.None });
     }
 
     private static ImmutableArray<Dependence> Peak =>
@@ -114,7 +114,7 @@ internal sealed class StepDownStresses
         stresses[_outputLow] = _volts;
         stresses[_outputHigh] = _volts;
         stresses[_reverse] = places.BusMax(x);
-        stresses[_temperature] = places.Ambient(x);
+        stresses[_temperature] = places.Air(x);
     }
 
     private static IEnumerable<Dependence> NotAt(params InputId[] buses) => None("the stress is taken at another point of the bus", buses);

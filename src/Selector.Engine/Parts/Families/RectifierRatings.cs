@@ -17,6 +17,11 @@ public static class RectifierRatings
     public const string ThresholdDrift = "threshold_drift";
     public const string Cooling = "junction_to_air";
 
+    public const string CaseCooling = "junction_to_case";
+    public const string Leakage = "reverse_current_hot";
+    public const string LeakageAt = "reverse_hot_temperature";
+    public const string RecoveryCharge = "recovery_charge";
+
     internal static RatingSpec[] All { get; } =
     [
         new(Reverse, "reverse voltage", Units.Volt, Range.Volts, "Repetitive peak reverse voltage of one diode.") { Required = true, InDescription = true },
@@ -29,6 +34,10 @@ public static class RectifierRatings
         new(Threshold, "threshold voltage", Units.Volt, Range.Drop, "Where the straight line through the forward curve meets zero current, at 25 °C."),
         new(Slope, "slope resistance", Units.Ohm, new(0, 100), "Slope of that line, of one diode."),
         new(ThresholdDrift, "threshold drift", Units.VoltPerKelvin, new(-0.01, 0.01), "Change of the threshold with junction temperature; blank counts as none."),
+        new(CaseCooling, "junction to case", Units.KelvinPerWatt, Range.Cooling, "Thermal resistance to the case of a part that can be bolted to a sink; of all its diodes together."),
+        new(Leakage, "hot reverse current", Units.Ampere, new(1e-9, 10), "Greatest reverse current at rated reverse voltage and the temperature beside it."),
+        new(LeakageAt, "hot reverse current at", Units.Celsius, Range.Degrees, "Junction temperature at which it holds."),
+        new(RecoveryCharge, "recovery charge", Units.Coulomb, new(1e-12, 1e-3), "Reverse recovery charge, or the charge of the junction capacitance of a Schottky, at rated current."),
         new(Cooling, "junction to air", Units.KelvinPerWatt, Range.Cooling, "Thermal resistance of the whole part in still open air, as mounted."),
     ];
 }
