@@ -31,5 +31,13 @@ public static class Standard
             ResistorFamily.Spec,
             HeatSinkFamily.Spec,
             InterfaceFamily.Spec,
+            LinearRegulatorFamily.Spec,
+            FilmCapacitorFamily.Spec,
+            FuseFamily.Spec,
+            FuseHolderFamily.Spec,
+            LimiterFamily.Spec,
+            VaristorFamily.Spec,
+            SwitchFamily.Spec,
+            ConnectorFamily.Spec,
         ]);
 }

@@ -18,6 +18,10 @@ public static class CapacitorFamily
     public const string Diameter = "diameter";
     public const string Height = "height";
 
+    public const string Esl = "esl";
+    public const string EsrCold = "esr_cold";
+    public const string RippleRise = "ripple_rise";
+
     public static FamilySpec Spec { get; } = new(Id, "electrolytic capacitor", "electrolytic capacitors",
     [
         new(Capacitance, "capacitance", Units.Farad, new(1e-8, 10), "Nominal, at 100 or 120 Hz.") { Required = true, InDescription = true },
@@ -29,6 +33,9 @@ public static class CapacitorFamily
         new(EsrHigh, "ESR at 100 kHz", Units.Ohm, new(1e-4, 1e3), "Greatest series resistance or impedance at 100 kHz, 20 °C."),
         .. FrequencyMultiplier.Ratings,
         new(TemperatureMax, "upper temperature", Units.Celsius, new(40, 200), "Upper category temperature."),
+        new(Esl, "series inductance", Units.Henry, new(1e-10, 1e-5), "Of the leads and the winding."),
+        new(EsrCold, "cold ESR", Units.One, new(1, 100), "ESR at -10 °C over that at 20 °C; blank counts as 3."),
+        new(RippleRise, "core rise", Units.Kelvin, new(0.5, 50), "Rise of the core at rated ripple current; blank counts as 5 K."),
         new(Life, "life", Units.Hour, new(100, 1e6), "At the upper temperature with rated ripple current."),
         new(Diameter, "diameter", Units.Millimetre, Range.Length, "Of the can."),
         new(Height, "height", Units.Millimetre, Range.Length, "Of the can, without leads."),

@@ -22,6 +22,12 @@ public static class RectifierRatings
     public const string LeakageAt = "reverse_hot_temperature";
     public const string RecoveryCharge = "recovery_charge";
 
+    public const string LowVoltage = "v_low";
+    public const string LowCurrent = "i_low";
+    public const string HighVoltage = "v_high";
+    public const string HighCurrent = "i_high";
+    public const string CapacitiveFactor = "capacitive_factor";
+
     internal static RatingSpec[] All { get; } =
     [
         new(Reverse, "reverse voltage", Units.Volt, Range.Volts, "Repetitive peak reverse voltage of one diode.") { Required = true, InDescription = true },
@@ -34,6 +40,11 @@ public static class RectifierRatings
         new(Threshold, "threshold voltage", Units.Volt, Range.Drop, "Where the straight line through the forward curve meets zero current, at 25 °C."),
         new(Slope, "slope resistance", Units.Ohm, new(0, 100), "Slope of that line, of one diode."),
         new(ThresholdDrift, "threshold drift", Units.VoltPerKelvin, new(-0.01, 0.01), "Change of the threshold with junction temperature; blank counts as none."),
+        new(LowVoltage, "forward voltage, low point", Units.Volt, Range.Drop, "At the current beside it, 25 °C."),
+        new(LowCurrent, "low point at", Units.Ampere, Range.Amperes, "Current of the low point."),
+        new(HighVoltage, "forward voltage, high point", Units.Volt, Range.Drop, "At the current beside it, 25 °C."),
+        new(HighCurrent, "high point at", Units.Ampere, Range.Amperes, "Current of the high point."),
+        new(CapacitiveFactor, "on a capacitor", Units.Percent, new(0.1, 1), "Share of the average current that is left with a reservoir behind it; blank counts as all."),
         new(CaseCooling, "junction to case", Units.KelvinPerWatt, Range.Cooling, "Thermal resistance to the case of a part that can be bolted to a sink; of all its diodes together."),
         new(Leakage, "hot reverse current", Units.Ampere, new(1e-9, 10), "Greatest reverse current at rated reverse voltage and the temperature beside it."),
         new(LeakageAt, "hot reverse current at", Units.Celsius, Range.Degrees, "Junction temperature at which it holds."),

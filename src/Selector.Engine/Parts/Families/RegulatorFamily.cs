@@ -26,6 +26,16 @@ public static class RegulatorFamily
     public const string JunctionMax = "junction_max";
     public const string Cooling = "junction_to_air";
 
+    public const string Start = "start_voltage";
+    public const string LoadMin = "load_min";
+    public const string CaseCooling = "junction_to_case";
+    public const string InductanceMin = "inductance_min";
+    public const string InductanceMax = "inductance_max";
+    public const string CapacitanceMin = "capacitance_min";
+    public const string CapacitanceMax = "capacitance_max";
+    public const string EsrMin = "esr_min";
+    public const string EsrMax = "esr_max";
+
     public static FamilySpec Spec { get; } = new(Id, "switching regulator", "switching regulators",
     [
         new(InputMin, "least input", Units.Volt, new(1, 500), "Below it the part locks out.") { Required = true },
@@ -45,6 +55,15 @@ public static class RegulatorFamily
         new(Quiescent, "quiescent current", Units.Ampere, new(0, 1), "Own consumption while switching."),
         new(ShortFrequency, "frequency when shorted", Units.Hertz, new(10, 1e7), "Where the part lowers its frequency when the output is shorted; blank counts as no lowering."),
         new(Skips, "skips pulses when shorted", Units.One, new(0, 1), "Whether it leaves out pulses to hold its limit at the least on-time; blank counts as no.") { Choices = ["no", "yes"] },
+        new(Start, "start voltage", Units.Volt, new(1, 500), "Greatest input at which it starts, rising."),
+        new(LoadMin, "least load", Units.Ampere, new(0, 100), "Least output current without skipping, as far as the maker states it; blank counts as none needed."),
+        new(InductanceMin, "least inductance", Units.Henry, new(1e-9, 10), "Smallest coil with which the maker calls it stable."),
+        new(InductanceMax, "greatest inductance", Units.Henry, new(1e-9, 10), "Largest coil with which the maker calls it stable."),
+        new(CapacitanceMin, "least output capacitance", Units.Farad, new(1e-9, 10), "Smallest output capacitor with which the maker calls it stable."),
+        new(CapacitanceMax, "greatest output capacitance", Units.Farad, new(1e-9, 10), "Largest output capacitor with which the maker calls it stable."),
+        new(EsrMin, "least ESR", Units.Ohm, new(0, 100), "Least series resistance of that capacitor, at the crossover."),
+        new(EsrMax, "greatest ESR", Units.Ohm, new(1e-4, 100), "Greatest series resistance of that capacitor."),
+        new(CaseCooling, "junction to case", Units.KelvinPerWatt, Range.Cooling, "Thermal resistance to the tab of a part that can be bolted to a sink."),
         new(JunctionMax, "junction limit", Units.Celsius, new(50, 250), "Greatest junction temperature."),
         new(Cooling, "junction to air", Units.KelvinPerWatt, Range.Cooling, "Thermal resistance to still open air, as mounted."),
     ])
