@@ -1,7 +1,11 @@
 using Selector.Engine.Circuits.CurrentLimit;
 using Selector.Engine.Circuits.Direct;
+using Selector.Engine.Circuits.Life;
 using Selector.Engine.Circuits.Mains;
 using Selector.Engine.Circuits.Output;
+using Selector.Engine.Circuits.Preload;
+using Selector.Engine.Circuits.Protection;
+using Selector.Engine.Circuits.Series;
 using Selector.Engine.Circuits.StepDown;
 using Selector.Engine.Circuits.Thermal;
 using Selector.Engine.Parts.Families;
@@ -15,10 +19,14 @@ public static class Standard
     public static Registry Registry { get; } = new(
         [
             new OutputStage(),
+            new LifeStage(),
             new MainsStage(),
             new DirectStage(),
             new StepDownStage(),
+            new SeriesStage(),
             new SenseStage(),
+            new PreloadStage(),
+            new ProtectionStage(),
             new ThermalStage(),
         ],
         [

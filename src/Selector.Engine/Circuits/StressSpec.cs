@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using Selector.Engine.Corners;
 using Selector.Engine.Parts;
 using Selector.Engine.Quantities;
 
@@ -55,6 +56,9 @@ public sealed record StressSpec(string Position, string Kind, string Name, Unit 
 
     /// <summary>A matter of fitting or not, such as the primary's voltage: it can lack, but a margin of it says nothing.</summary>
     public bool IsMatch { get; init; }
+
+    /// <summary>Not a worst corner but a mean over these conditions, by the time at each (harmonic, as lives add up); empty for a corner.</summary>
+    public ImmutableArray<ProfilePoint> Profile { get; init; } = [];
 
     /// <summary>The temperature at which the rating is read, if it falls with temperature: that of the air in the case, or the ambient, unless a link is named.</summary>
     public string? TemperatureLink { get; init; }

@@ -60,7 +60,7 @@ public sealed class CornerSearch
         failed = new Condition?[stresses];
         for (var s = 0; s < stresses; s++)
         {
-            if (focus?.Contains(s) == false)
+            if (focus?.Contains(s) == false || IsProfile(s))
             {
                 continue;
             }
@@ -78,12 +78,17 @@ public sealed class CornerSearch
         var worst = new Condition?[stresses];
         for (var s = 0; s < stresses; s++)
         {
-            worst[s] = focus?.Contains(s) == false ? null : Climb(s, severities[s]);
+            worst[s] = IsProfile(s) ? OverProfile(s) : focus?.Contains(s) == false ? null : Climb(s, severities[s]);
         }
 
         // What one stress's climb uncovered may be worse for another than its own climb's end; a tie keeps the own corner.
         for (var s = 0; s < stresses; s++)
         {
+            if (IsProfile(s))
+            {
+                continue;
+            }
+
             var found = WorstOfPool(severities[s]);
             if (worst[s] is not { } own
                 || (found is not null && severities[s].Of(found) > severities[s].Of(own) + Tie * Math.Abs(severities[s].Of(own))))
@@ -93,6 +98,38 @@ public sealed class CornerSearch
         }
 
         return worst;
+    }
+
+    private bool IsProfile(int stress) => !_model.Stresses[stress].Spec.Profile.IsEmpty;
+
+    /// <summary>
+    /// The harmonic mean of a stress over the conditions of its profile, as a condition of its own; null when one of them has no
+    /// solution.
+    /// </summary>
+    private Condition? OverProfile(int stress)
+    {
+        var sum = 0.0;
+        Condition? last = null;
+        foreach (var point in _model.Stresses[stress].Spec.Profile)
+        {
+            var at = _pool.At([.. _model.Axes.Select(a => point.Axes.TryGetValue(a.Id, out var value) ? value : a.Nominal)]);
+            if (!at.Solved || !(at.Stresses[stress] > 0))
+            {
+                return null;
+            }
+
+            sum += point.Share / at.Stresses[stress];
+            last = at;
+        }
+
+        if (last is null)
+        {
+            return null;
+        }
+
+        var stresses = (double[])last.Stresses.Clone();
+        stresses[stress] = 1 / sum;
+        return last with { Stresses = stresses };
     }
 
     /// <summary>Direction in which severity grows with an axis: the stress's own, joined with that of what is allowed.</summary>

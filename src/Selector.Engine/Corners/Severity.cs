@@ -115,7 +115,7 @@ public sealed class Severity
         return _spec.Side switch
         {
             Side.Ceiling => allowed > 0 ? stress / allowed : double.PositiveInfinity,
-            Side.Floor => stress > 0 ? allowed / stress : double.PositiveInfinity,
+            Side.Floor => allowed <= 0 ? 0 : stress > 0 ? allowed / stress : double.PositiveInfinity,
             _ => allowed > ambient ? (stress - ambient) / (allowed - ambient) : double.PositiveInfinity,
         };
     }

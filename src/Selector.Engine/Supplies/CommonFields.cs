@@ -5,6 +5,11 @@ public static class CommonFields
 {
     public const string Source = "source";
     public const string OutputVoltage = "output.voltage";
+    public const string OutputLeast = "output.least";
+    public const string OutputAdjust = "output.adjust";
+    public const string Regulation = "regulation";
+    public const string StepDown = "step-down";
+    public const string Linear = "linear";
     public const string OutputRipple = "output.ripple";
     public const string LoadLeast = "load.least";
     public const string LoadFull = "load.full";
@@ -16,6 +21,7 @@ public static class CommonFields
 
     public const string AmbientAxis = "ambient";
     public const string LoadAxis = "load";
+    public const string OutputAxis = "output";
     public const string ShortAxis = "short";
 }
 
@@ -36,6 +42,12 @@ public static class LinkNames
 
     /// <summary>Power that the regulator takes from the bus, W.</summary>
     public const string RegulatorPower = "regulator.input-power";
+
+    /// <summary>Mean current that the regulator takes from the bus, A.</summary>
+    public const string RegulatorCurrent = "regulator.input-current";
+
+    /// <summary>Current of the preload at the output terminals, A.</summary>
+    public const string PreloadCurrent = "preload.current";
 
     /// <summary>Alternating part of the regulator's input current, A rms.</summary>
     public const string RegulatorRipple = "regulator.input-ripple";

@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using Selector.Engine.Circuits;
 using Selector.Engine.Corners;
 using Selector.Engine.Derating;
+using Selector.Engine.Quantities;
 
 namespace Selector.Engine.Supplies;
 
@@ -162,6 +163,11 @@ internal sealed class RowMaker(
 
     private ImmutableArray<AxisFinding> Findings()
     {
+        if (!Spec.Profile.IsEmpty)
+        {
+            return [];
+        }
+
         var spec = model.Stages[model.Stresses[stress].Stage];
         return
         [
@@ -177,6 +183,11 @@ internal sealed class RowMaker(
 
     private string Words(Condition at)
     {
+        if (!Spec.Profile.IsEmpty)
+        {
+            return string.Join("; ", Spec.Profile.Select(p => string.Join(", ", p.Axes.Select(a => model.Axes.First(x => x.Id == a.Key).Words(a.Value)).Prepend(QuantityWriter.Write(p.Share, Units.Percent) + " of the time"))));
+        }
+
         // A shorted output has no load to speak of.
         var shorted = Enumerable.Range(0, model.Axes.Length).Any(a => model.Axes[a].Id == CommonFields.ShortAxis && at.Axes[a] > 0.5);
         return string.Join(", ", Enumerable.Range(0, model.Axes.Length)

@@ -8,7 +8,7 @@ using static Selector.Engine.Circuits.Dependences;
 
 namespace Selector.Engine.Circuits.Direct;
 
-/// <summary>The bus behind a DC source: one quadratic equation, since the regulator draws constant power.</summary>
+/// <summary>The bus behind a DC source: one quadratic equation where the regulator draws constant power.</summary>
 internal sealed class DirectModel : ReservoirModel
 {
     private static readonly InputId Source = InputId.Axis(DirectStage.Axis);
@@ -46,10 +46,8 @@ internal sealed class DirectModel : ReservoirModel
             new("F1", "fuse in the DC line: rating, breaking and fault current"),
             new("J1", "input connector, continuous current"),
             new("D7", "reverse input protection"),
-            new(C1, "life over the load profile"),
             new(C1, "surge at switch-on"),
-            new("C3", "bypass at U1: switching ripple"),
-            new("R1", "bleeder: power and time to a safe voltage"),
+                new("R1", "bleeder: power and time to a safe voltage"),
         ];
         View = new StageView(["The reservoir stays charged after the source is gone: discharge it and prove it dead."]);
     }
@@ -57,7 +55,7 @@ internal sealed class DirectModel : ReservoirModel
     protected override ImmutableArray<Dependence> VoltageOn =>
     [
         .. Rises("the bus follows the source", Source),
-        .. Falls("more power drops more in the source resistance", InputId.Link(LinkNames.RegulatorPower)),
+        .. Falls("more power drops more in the source resistance", DrawLink),
     ];
 
     protected override ImmutableArray<Dependence> RippleOn =>
@@ -72,14 +70,14 @@ internal sealed class DirectModel : ReservoirModel
     public override SolveStatus Solve(ReadOnlySpan<double> inputs, Span<double> links, Span<double> stresses, in Budget budget)
     {
         var source = inputs[_source];
-        var under = source * source - 4 * _resistance * inputs[Power];
-        if (under < 0)
+        var under = source * source - 4 * _resistance * inputs[Draw];
+        if (!IsCurrent && under < 0)
         {
             return SolveStatus.NoOperatingPoint;
         }
 
-        // The upper root: the lower one is the unstable point at which the converter pulls the source down.
-        var bus = (source + Math.Sqrt(under)) / 2;
+        // Of a constant power the upper root: the lower one is the unstable point at which the converter pulls the source down.
+        var bus = IsCurrent ? source - _resistance * inputs[Draw] : (source + Math.Sqrt(under)) / 2;
         links[_mean] = links[_max] = links[_min] = bus;
         if (!stresses.IsEmpty)
         {

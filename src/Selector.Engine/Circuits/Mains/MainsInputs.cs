@@ -36,6 +36,7 @@ internal sealed class MainsInputs
     private readonly int _threshold;
     private readonly int _drift;
     private readonly int _slope;
+    private readonly int _capacitive;
     private readonly int _junction;
 
     public MainsInputs(Func<InputId, double?, int> read, RequirementValues r, FrontEndTopology topology)
@@ -69,6 +70,7 @@ internal sealed class MainsInputs
         _threshold = read(InputId.Column(topology.Rectifier, RectifierRatings.Threshold), null);
         _drift = read(InputId.Column(topology.Rectifier, RectifierRatings.ThresholdDrift), 0);
         _slope = read(InputId.Column(topology.Rectifier, RectifierRatings.Slope), null);
+        _capacitive = read(InputId.Column(topology.Rectifier, RectifierRatings.CapacitiveFactor), 1);
         _junction = read(InputId.Link(LinkNames.Temperature(topology.Rectifier)), null);
         Basis = topology.Family == BridgeFamily.Id ? read(InputId.Column(topology.Rectifier, BridgeFamily.Basis), null) : -1;
     }
@@ -94,6 +96,9 @@ internal sealed class MainsInputs
     public double Flux(ReadOnlySpan<double> x, double ratedFrequency) =>
         Voltage(x) / x[_frequency] / (x[Primary] / ratedFrequency);
 
+    /// <summary>Share of the rated average current that a reservoir behind the rectifier leaves.</summary>
+    public double CapacitiveFactor(ReadOnlySpan<double> x) => x[_capacitive];
+
     public double Drift(ReadOnlySpan<double> x) => x[_drift];
 
     public Transformer Transformer(ReadOnlySpan<double> x)
@@ -113,7 +118,7 @@ internal sealed class MainsInputs
     }
 
     /// <summary>The circuit at a condition. A cold winding is on stiff mains, a hot one behind the mains impedance.</summary>
-    public RectifierCase Circuit(ReadOnlySpan<double> x, in Transformer t, FrontEndTopology topology, double capacitance, double esr, double power)
+    public RectifierCase Circuit(ReadOnlySpan<double> x, in Transformer t, FrontEndTopology topology, double capacitance, double esr, LoadKind kind, double draw)
     {
         var temperature = x[_air] + x[_winding] * Math.Max(0, x[_windingTemperature] - x[_air]);
 
@@ -132,8 +137,8 @@ internal sealed class MainsInputs
             x[_slope],
             capacitance,
             esr,
-            LoadKind.Power,
-            power);
+            kind,
+            draw);
     }
 
     /// <summary>Heat in core and windings, W, and the winding's temperature once it has settled, °C.</summary>

@@ -9,7 +9,7 @@ using static Selector.Engine.Circuits.Dependences;
 
 namespace Selector.Engine.Circuits.Mains;
 
-/// <summary>Transformer, rectifier and reservoir, loaded with the constant power that the regulator draws.</summary>
+/// <summary>Transformer, rectifier and reservoir, loaded with the power or the current that the regulator draws.</summary>
 internal sealed class MainsModel : ReservoirModel
 {
     private const string T1 = "T1";
@@ -43,15 +43,15 @@ internal sealed class MainsModel : ReservoirModel
         _mean = Write(new(LinkNames.BusMean, Units.Volt, guess, [.. BusOn]));
         _max = Write(new(LinkNames.BusMax, Units.Volt, guess, [.. BusOn]));
         _min = Write(new(LinkNames.BusMin, Units.Volt, guess, [.. BusOn]));
-        _loss = Write(new(LinkNames.Loss(topology.Rectifier), Units.Watt, 0.5, [.. MainsStresses.CurrentOn(topology)]));
+        _loss = Write(new(LinkNames.Loss(topology.Rectifier), Units.Watt, 0.5, [.. MainsStresses.CurrentOn(topology, DrawLink)]));
         _start = Write(new("rectifier.start", Units.Volt, 0) { Others = Push.None, IsHint = true });
         _slope = Write(new("rectifier.slope", Units.One, 0) { Others = Push.None, IsHint = true });
-        _current = Write(new(LinkNames.MainsCurrent, Units.Ampere, 0.1, [.. MainsStresses.CurrentOn(topology)]));
-        _winding = Write(new(LinkNames.Temperature(T1), Units.Celsius, 60, [.. MainsStresses.CurrentOn(topology)]));
-        _transformerLoss = Write(new(LinkNames.Loss(T1), Units.Watt, 1, [.. MainsStresses.CurrentOn(topology)]));
-        _slopeOfLoss = Write(new(LinkNames.LossSlope(topology.Rectifier), Units.WattPerKelvin, 0, [.. MainsStresses.CurrentOn(topology)]));
+        _current = Write(new(LinkNames.MainsCurrent, Units.Ampere, 0.1, [.. MainsStresses.CurrentOn(topology, DrawLink)]));
+        _winding = Write(new(LinkNames.Temperature(T1), Units.Celsius, 60, [.. MainsStresses.CurrentOn(topology, DrawLink)]));
+        _transformerLoss = Write(new(LinkNames.Loss(T1), Units.Watt, 1, [.. MainsStresses.CurrentOn(topology, DrawLink)]));
+        _slopeOfLoss = Write(new(LinkNames.LossSlope(topology.Rectifier), Units.WattPerKelvin, 0, [.. MainsStresses.CurrentOn(topology, DrawLink)]));
         OtherLosses = [new(LinkNames.Loss(T1))];
-        _stress = new MainsStresses(Stress, topology, r, BusOn);
+        _stress = new MainsStresses(Stress, topology, r, DrawLink, BusOn);
         Axes =
         [
             new(MainsStage.MainsAxis, new(1 - r[MainsStage.Low], 1 + r[MainsStage.High]), 1, MainsWords) { Probes = 3 },
@@ -89,10 +89,10 @@ internal sealed class MainsModel : ReservoirModel
 
     protected override ImmutableArray<Dependence> VoltageOn => BusOn;
 
-    private static ImmutableArray<Dependence> BusOn =>
+    private ImmutableArray<Dependence> BusOn =>
     [
         .. Rises("the bus follows the secondary", Mains),
-        .. Falls("more power drops more in winding and diodes", InputId.Link(LinkNames.RegulatorPower)),
+        .. Falls("more power drops more in winding and diodes", DrawLink),
         .. Falls("a hot winding drops more, and has the mains impedance before it", Winding),
         .. None("the rectifier sees only the mean power", InputId.Link(LinkNames.RegulatorRipple), InputId.Link(LinkNames.RegulatorFrequency)),
         .. None("a weight of the ripple rating only", [.. FrequencyMultiplier.Keys.Select(k => InputId.Column(C1, k))]),
@@ -101,7 +101,7 @@ internal sealed class MainsModel : ReservoirModel
     public override SolveStatus Solve(ReadOnlySpan<double> inputs, Span<double> links, Span<double> stresses, in Budget budget)
     {
         var transformer = _in.Transformer(inputs);
-        var circuit = _in.Circuit(inputs, transformer, _topology, CapacitanceAt(inputs), EsrAt(inputs), inputs[Power]);
+        var circuit = _in.Circuit(inputs, transformer, _topology, CapacitanceAt(inputs), EsrAt(inputs), IsCurrent ? LoadKind.Current : LoadKind.Power, inputs[Draw]);
         var status = RectifierSolver.Solve(
             circuit, budget, new RectifierStart(links[_start], links[_slope]), stresses.IsEmpty ? RectifierDetail.Loop : RectifierDetail.All, out var s);
         if (status != SolveStatus.Solved)

@@ -14,9 +14,7 @@ internal static class MainsOpenPoints
         new("RV1", "varistor, if any: voltage and energy"),
         new("T1", "core inrush"),
         new(rectifier, "first surge and its integral at switch-on"),
-        new("C1", "life over the load profile"),
         new("C1", "hold-up of a missed half-cycle"),
-        new("C3", "bypass at U1: switching ripple"),
         new("R1", "bleeder: power and time to a safe voltage"),
     ];
 }

@@ -12,6 +12,11 @@ public sealed class OutputStage : IStage
     public const string SourceDirect = "dc";
     public const string ShortHeld = "short.held";
 
+    public const string Fixed = "fixed";
+    public const string Adjustable = "adjustable";
+
+    private static readonly Func<RequirementValues, bool> IsAdjustable = r => r.Is(CommonFields.OutputAdjust, Adjustable);
+
     public string Id => "output";
 
     public string Name => "output and place";
@@ -20,7 +25,12 @@ public sealed class OutputStage : IStage
     [
         new(CommonFields.Source, "Source", Units.One, default, SourceDirect, "What feeds the supply.")
             { Group = "Source", Choices = [new(SourceMains, "mains"), new(SourceDirect, "DC")] },
-        new(CommonFields.OutputVoltage, "Output", Units.Volt, new(0.5, 400), "5 V", "Voltage at the output terminals.") { Group = "Output" },
+        new(CommonFields.Regulation, "Regulation", Units.One, default, CommonFields.StepDown, "How the output is regulated.")
+            { Group = "Output", Choices = [new(CommonFields.StepDown, "step-down converter"), new(CommonFields.Linear, "linear, in series")] },
+        new(CommonFields.OutputAdjust, "Output is", Units.One, default, Fixed, "One voltage, or a range that the user sets.")
+            { Group = "Output", Choices = [new(Fixed, "fixed"), new(Adjustable, "adjustable")] },
+        new(CommonFields.OutputVoltage, "Output", Units.Volt, new(0.5, 400), "5 V", "Voltage at the output terminals; of an adjustable supply the greatest.") { Group = "Output" },
+        new(CommonFields.OutputLeast, "Output, least", Units.Volt, new(0.3, 400), "1.5 V", "Lowest voltage that can be set.") { Group = "Output", Shown = IsAdjustable },
         new(CommonFields.OutputRipple, "Output ripple", Units.Volt, new(1e-4, 50), "50 mV", "Greatest peak-to-peak ripple allowed at the output.") { Group = "Output" },
         new(CommonFields.LoadLeast, "Least load", Units.Ampere, new(0, 1000), "0 A", "Least current that is always drawn; 0 when the output may be open.") { Group = "Output" },
         new(CommonFields.LoadFull, "Full load", Units.Ampere, new(1e-3, 1000), "1 A", "Greatest continuous output current.") { Group = "Output" },
@@ -37,6 +47,7 @@ public sealed class OutputStage : IStage
     [
         new([CommonFields.LoadLeast, CommonFields.LoadFull], v => v[0] <= v[1], "is above the full load. Make it at most the full load."),
         new([CommonFields.AmbientLow, CommonFields.AmbientHigh], v => v[0] <= v[1], "is above the greatest ambient. Make it at most that."),
+        new([CommonFields.OutputLeast, CommonFields.OutputVoltage], v => v[0] <= v[1], "is above the greatest output. Make it at most that."),
         new([CommonFields.OutputRipple, CommonFields.OutputVoltage], v => v[0] < v[1], "is not below the output voltage. Type a smaller one."),
     ];
 
@@ -52,6 +63,7 @@ public sealed class OutputStage : IStage
             Axes =
             [
                 new(CommonFields.LoadAxis, new(least, full), full, v => v == 0 ? "no load" : QuantityWriter.Write(v, Units.Ampere)) { Probes = 3 },
+                new(CommonFields.OutputAxis, LeastOutput(r), r[CommonFields.OutputVoltage], v => $"{QuantityWriter.Write(v, Units.Volt)} out") { Probes = 3 },
                 new(CommonFields.ShortAxis, new(0, r.Is(ShortHeld, "held") ? 1 : 0), 0, v => v > 0.5 ? "output shorted" : "") { EndsOnly = true },
                 new(
                     CommonFields.AmbientAxis,
@@ -61,6 +73,9 @@ public sealed class OutputStage : IStage
             ];
             NotAssessed = [new("J2", "output terminals, continuous and shorted current")];
         }
+
+        private static Interval LeastOutput(RequirementValues r) =>
+            new(IsAdjustable(r) ? r[CommonFields.OutputLeast] : r[CommonFields.OutputVoltage], r[CommonFields.OutputVoltage]);
 
         public override SolveStatus Solve(ReadOnlySpan<double> inputs, Span<double> links, Span<double> stresses, in Budget budget) => SolveStatus.Solved;
     }

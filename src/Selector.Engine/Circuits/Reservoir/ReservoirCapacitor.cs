@@ -39,6 +39,14 @@ public static class ReservoirCapacitor
     public static double Esr(double greatest, double place) =>
         greatest * new Interval(LeastEsr, AgedEsr).At(place);
 
+    /// <summary>The same at a temperature.</summary>
+    /// <param name="greatest">As the data sheet limits it, ohm.</param>
+    /// <param name="place">0 for new, 1 for aged.</param>
+    /// <param name="cold">Factor at -10 °C.</param>
+    /// <param name="temperature">°C.</param>
+    public static double Esr(double greatest, double place, double cold, double temperature) =>
+        Esr(greatest, place) * ColdEsr.Factor(cold, temperature);
+
     /// <summary>The rating's multiplier table must reach down to a frequency; it is never read below its lowest point.</summary>
     /// <param name="position">Designator.</param>
     /// <param name="key">The column that a data sheet would have to give.</param>

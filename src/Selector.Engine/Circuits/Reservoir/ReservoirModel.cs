@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using Selector.Engine.Circuits.Life;
 using Selector.Engine.Circuits.Thermal;
 using Selector.Engine.Parts;
 using Selector.Engine.Parts.Families;
@@ -15,6 +16,7 @@ public abstract class ReservoirModel : StageModel
 
     /// <summary>Below this share of full power the converter's own loss would be unknown; used only for stand-ins.</summary>
     private const double EverydayEfficiency = 0.8;
+    private const double LinearEfficiency = 0.55;
 
     private readonly int _capacitance;
     private readonly int _tolerance;
@@ -25,12 +27,13 @@ public abstract class ReservoirModel : StageModel
     private readonly int _voltage;
     private readonly int _ripple;
     private readonly int _temperature;
+    private readonly int _esrCold, _lifeRated, _lifeAt, _rippleRise, _rippleRated, _life;
     private readonly int _air;
     private readonly double _localRise;
 
     protected ReservoirModel(RequirementValues r, string lowestKey, double lowestFrequency)
     {
-        FullPower = r[CommonFields.OutputVoltage] * r[CommonFields.LoadFull] / EverydayEfficiency;
+        FullPower = r[CommonFields.OutputVoltage] * r[CommonFields.LoadFull] / (r.Is(CommonFields.Regulation, CommonFields.Linear) ? LinearEfficiency : EverydayEfficiency);
         _capacitance = Read(InputId.Column(C1, CapacitorFamily.Capacitance));
         _tolerance = Read(InputId.Column(C1, CapacitorFamily.Tolerance), 0.2);
         _esr = Read(InputId.Column(C1, CapacitorFamily.EsrLow));
@@ -39,9 +42,16 @@ public abstract class ReservoirModel : StageModel
         var air = Surroundings.Air(r);
         _air = Read(air);
         _localRise = Surroundings.LocalRise(r);
-        Power = Read(InputId.Link(LinkNames.RegulatorPower));
+        IsCurrent = r.Is(CommonFields.Regulation, CommonFields.Linear);
+        DrawLink = InputId.Link(IsCurrent ? LinkNames.RegulatorCurrent : LinkNames.RegulatorPower);
+        Draw = Read(DrawLink);
         RippleIn = Read(InputId.Link(LinkNames.RegulatorRipple));
         FrequencyIn = Read(InputId.Link(LinkNames.RegulatorFrequency));
+        _esrCold = Read(InputId.Column(C1, CapacitorFamily.EsrCold), ColdEsr.Usual);
+        _lifeRated = Read(InputId.Column(C1, CapacitorFamily.Life), 0);
+        _lifeAt = Read(InputId.Column(C1, CapacitorFamily.TemperatureMax), 85);
+        _rippleRise = Read(InputId.Column(C1, CapacitorFamily.RippleRise), 5);
+        _rippleRated = Read(InputId.Column(C1, CapacitorFamily.Ripple), 0);
         _firstMultiplier = Inputs.Length;
         foreach (var key in FrequencyMultiplier.Keys)
         {
@@ -59,6 +69,15 @@ public abstract class ReservoirModel : StageModel
             On = RippleOn,
             Others = Others,
         });
+        _life = Stress(new(C1, "life", "life over the load profile, at least", Units.Hour, Side.Floor, LifeFields.Bound(r), LifeFields.Equation)
+        {
+            Profile = LifeFields.Profile(r),
+            Needs =
+            [
+                new Need(C1, CapacitorFamily.Life, "its life is not known"), new Need(C1, CapacitorFamily.Ripple, "its ripple rating is not known"),
+                new Need(C1, CapacitorFamily.TemperatureMax, "its upper temperature is not known"),
+            ],
+        });
         _temperature = Stress(new(C1, "temperature", "air at its place", Units.Celsius, Side.Temperature, new Bound.Rating(CapacitorFamily.TemperatureMax), "T = T_air + local rise")
         {
             On = [.. Rises("it is the air around it", air)],
@@ -69,8 +88,14 @@ public abstract class ReservoirModel : StageModel
     /// <summary>Rough power from the bus at full load, for stand-ins only, W.</summary>
     protected double FullPower { get; }
 
+    /// <summary>Whether the regulator draws a current of its own, as a series regulator does, instead of a power.</summary>
+    protected bool IsCurrent { get; }
+
+    /// <summary>What the regulator draws: a current in A or a power in W.</summary>
+    protected InputId DrawLink { get; }
+
     /// <summary>Places of the links that the regulator writes.</summary>
-    protected int Power { get; }
+    protected int Draw { get; }
 
     protected int RippleIn { get; }
 
@@ -93,7 +118,8 @@ public abstract class ReservoirModel : StageModel
     protected double CapacitanceAt(ReadOnlySpan<double> inputs) =>
         ReservoirCapacitor.Capacitance(inputs[_capacitance], inputs[_tolerance], inputs[_place]);
 
-    protected double EsrAt(ReadOnlySpan<double> inputs) => ReservoirCapacitor.Esr(inputs[_esr], inputs[_esrPlace]);
+    protected double EsrAt(ReadOnlySpan<double> inputs) => 
+        ReservoirCapacitor.Esr(inputs[_esr], inputs[_esrPlace], inputs[_esrCold], inputs[_air] + _localRise);
 
     /// <summary>Writes the stresses of C1.</summary>
     protected void WriteReservoir(ReadOnlySpan<double> inputs, Span<double> stresses, double busMax, double lowRipple, double lowFrequency)
@@ -101,6 +127,8 @@ public abstract class ReservoirModel : StageModel
         var table = inputs.Slice(_firstMultiplier, FrequencyMultiplier.Keys.Length);
         stresses[_voltage] = busMax;
         stresses[_ripple] = RippleWeight.Equivalent(table, lowRipple, lowFrequency, inputs[RippleIn], inputs[FrequencyIn]);
+        stresses[_life] = ElectrolyticLife.Hours(
+            inputs[_lifeRated], inputs[_lifeAt], inputs[_rippleRise], inputs[_air] + _localRise, inputs[_rippleRated] > 0 ? stresses[_ripple] / inputs[_rippleRated] : 1);
         stresses[_temperature] = inputs[_air] + _localRise;
     }
 }

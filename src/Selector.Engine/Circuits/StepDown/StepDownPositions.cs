@@ -11,6 +11,7 @@ internal static class StepDownPositions
     public const string D5 = "D5";
     public const string L1 = "L1";
     public const string C2 = "C2";
+    public const string C3 = "C3";
 
     private const double Frequency = 100e3;
     private const double RippleShare = 0.3;
@@ -44,20 +45,16 @@ internal static class StepDownPositions
             {
                 StandInReason = "a quarter of the ripple allowed, by its ESR",
             },
+            new(C3, "bypass at U1", FilmCapacitorFamily.Id, 1, Ratings((FilmCapacitorFamily.Capacitance, 1e-6), (FilmCapacitorFamily.Esr, 0.02)))
+            {
+                StandInReason = "1 µF",
+            },
         ];
     }
 
     public static ImmutableArray<NotAssessed> OpenPoints { get; } =
     [
-        new(U1, "start and lock-out at the lowest input"),
-        new(U1, "least load without skipping"),
-        new(L1, "core loss"),
-        new(D5, "recovery loss, and heating by leakage"),
-        new(C2, "stability of the regulator with this capacitor"),
-        new(C2, "series inductance in the ripple; cold ESR"),
-        new(C2, "life over the load profile"),
         new("R2", "feedback divider with R3: output error"),
-        new("D8", "output protection"),
     ];
 
     private static ImmutableDictionary<string, double> Ratings(params (string Key, double Value)[] ratings) =>

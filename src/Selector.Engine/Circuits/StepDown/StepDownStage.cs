@@ -16,7 +16,7 @@ public sealed class StepDownStage : IStage
 
     public ImmutableArray<FieldCheck> Checks => [];
 
-    public bool Applies(RequirementValues requirement) => true;
+    public bool Applies(RequirementValues requirement) => requirement.Is(CommonFields.Regulation, CommonFields.StepDown);
 
     public StageModel Build(RequirementValues requirement, ImmutableArray<StageModel> before) => new StepDownModel(requirement);
 }

@@ -13,23 +13,17 @@ public static class FuseFamily
     public const string BreakingDc = "breaking_dc";
     public const string Melting = "melting_integral";
     public const string Class = "melting_class";
-    public const string Standard = "standard";
+    public const string OpensAt = "opens_at";
     public const string Resistance = "cold_resistance";
     public const string Loss = "power_loss";
     public const string Knee = "current_knee";
     public const string Zero = "current_zero";
 
-    /// <summary>Place of IEC 60127 among the words of <see cref="Standard"/>.</summary>
-    public const double StandardIec = 0;
-
-    /// <summary>Place of time-lag among the words of <see cref="Class"/>.</summary>
-    public const double ClassTimeLag = 2;
-
     public static FamilySpec Spec { get; } = new(Id, "fuse link", "fuse links",
     [
         new(Current, "rated current", Units.Ampere, new(1e-3, 100), "As marked; the standard says how long it may be carried.") { Required = true, InDescription = true, Fall = new(Knee, Zero) },
         new(Class, "melting class", Units.One, new(0, 2), "How fast it opens.") { Choices = ["very quick", "quick", "time-lag"], Required = true, InDescription = true },
-        new(Standard, "standard", Units.One, new(0, 1), "It decides at which multiple of the rated current the link must open.") { Choices = ["IEC 60127", "UL 248-14"], Required = true },
+        new(OpensAt, "must open at", Units.One, new(1.1, 20), "Multiple of the rated current at which its standard makes it open within seconds or minutes.") { Required = true },
         new(VoltageAc, "AC voltage", Units.Volt, Range.Volts, "Greatest nominal system voltage.") { InDescription = true },
         new(VoltageDc, "DC voltage", Units.Volt, Range.Volts, "Greatest DC voltage that it breaks."),
         new(BreakingAc, "AC breaking current", Units.Ampere, Range.Amperes, "At the rated AC voltage."),
@@ -41,7 +35,7 @@ public static class FuseFamily
         new(Zero, "current gone at", Units.Celsius, Range.Degrees, "Where the straight line of the maker's derating meets nothing."),
     ])
     {
-        Technologies = ["5 x 20 mm", "6.3 x 32 mm", "board"],
+        Technologies = ["IEC 60127", "UL 248-14"],
         SafetyCritical = true,
         Checks = [new([Knee, Zero], v => v[0] < v[1], "The current is said to be full above where it is gone: check both.")],
     };

@@ -40,7 +40,7 @@ public static class LinearRegulatorFamily
         new(FoldBackCurrent, "fold-back to", Units.Ampere, new(0, 1000), "Limit that is left at the greatest differential."),
         new(Drop, "drop-out, fixed part", Units.Volt, Range.Drop, "Drop-out at no current.") { Required = true },
         new(DropResistance, "drop-out, slope", Units.Ohm, new(0, 100), "How it grows with current; blank counts as none, the fixed part being that at full current."),
-        new(LoadMin, "least load", Units.Ampere, new(0, 10), "Below it the output may rise; blank counts as none needed."),
+        new(LoadMin, "least load", Units.Ampere, new(0, 10), "Below it the output may rise; 0 when none is needed."),
         new(Quiescent, "quiescent current", Units.Ampere, new(0, 1), "Own consumption to ground."),
         new(Rejection, "ripple rejection", Units.One, new(1, 1e6), "Ripple at the input over that at the output, at 100 Hz."),
         new(JunctionMax, "junction limit", Units.Celsius, new(50, 250), "Greatest junction temperature."),

@@ -56,7 +56,7 @@ public static class RegulatorFamily
         new(ShortFrequency, "frequency when shorted", Units.Hertz, new(10, 1e7), "Where the part lowers its frequency when the output is shorted; blank counts as no lowering."),
         new(Skips, "skips pulses when shorted", Units.One, new(0, 1), "Whether it leaves out pulses to hold its limit at the least on-time; blank counts as no.") { Choices = ["no", "yes"] },
         new(Start, "start voltage", Units.Volt, new(1, 500), "Greatest input at which it starts, rising."),
-        new(LoadMin, "least load", Units.Ampere, new(0, 100), "Least output current without skipping, as far as the maker states it; blank counts as none needed."),
+        new(LoadMin, "least load", Units.Ampere, new(0, 100), "Least output current without skipping, as far as the maker states it; 0 when none is needed."),
         new(InductanceMin, "least inductance", Units.Henry, new(1e-9, 10), "Smallest coil with which the maker calls it stable."),
         new(InductanceMax, "greatest inductance", Units.Henry, new(1e-9, 10), "Largest coil with which the maker calls it stable."),
         new(CapacitanceMin, "least output capacitance", Units.Farad, new(1e-9, 10), "Smallest output capacitor with which the maker calls it stable."),
