@@ -56,11 +56,13 @@ internal sealed class RectifierKind : ICaseKind
         return ["0", .. Figures.Select(f => CaseRow.Say(f.Value(s)))];
     }
 
-    private static RectifierCase Circuit(CaseRow row)
+    internal static RectifierCase Circuit(CaseRow row) =>
+        Circuit(row, row.Word("load_type", ("ci", LoadKind.Current), ("cr", LoadKind.Resistance), ("cp", LoadKind.Power)));
+
+    internal static RectifierCase Circuit(CaseRow row, LoadKind kind)
     {
         var arrangement = row.Word(
             "arrangement", ("bridge", RectifierArrangement.Bridge), ("centretap", RectifierArrangement.CentreTap), ("halfwave", RectifierArrangement.HalfWave));
-        var kind = row.Word("load_type", ("ci", LoadKind.Current), ("cr", LoadKind.Resistance), ("cp", LoadKind.Power));
         var load = kind switch
         {
             LoadKind.Current => row.Number("load_i_a"),

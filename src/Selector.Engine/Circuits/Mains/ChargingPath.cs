@@ -31,21 +31,21 @@ internal readonly struct ChargingPath
 
     public double Omega { get; }
 
-    public double Peak { get; }
+    public double Peak { get; init; }
 
-    public double Drop { get; }
+    public double Drop { get; init; }
 
-    public double Resistance { get; }
+    public double Resistance { get; init; }
 
-    public double Inductance { get; }
+    public double Inductance { get; init; }
 
     public double Capacitance { get; }
 
     public double Esr { get; }
 
-    public LoadKind Kind { get; }
+    public LoadKind Kind { get; init; }
 
-    public double Load { get; }
+    public double Load { get; init; }
 
     /// <summary>Charging pulses in one period of the mains.</summary>
     public int PulsesPerPeriod { get; }
