@@ -81,7 +81,7 @@ internal ref struct TransientRun
             }
 
             var end = Math.Min(until, Time < EmfOffFrom ? EmfOffFrom : Time < EmfOffTo ? EmfOffTo : double.PositiveInfinity);
-            var goesOn = Positive > 0 || Negative > 0 || Begins(Time, Bus(U, 0)) != 0 ? Conduct(end, ref watch) : Rest(end, ref watch);
+            var goesOn = Positive > 0 || Negative > 0 || Begins(Resting, Time) != 0 ? Conduct(end, ref watch) : Rest(end, ref watch);
             if (!double.IsFinite(U + Positive + Negative))
             {
                 return SolveStatus.BadInput;
@@ -96,24 +96,38 @@ internal ref struct TransientRun
         return SolveStatus.OutOfBudget;
     }
 
+    private readonly BlockedStretch Resting => new(_load.At(_above), Time, U);
+
     private readonly double Bus(double u, double total)
     {
         var path = _load.At(_above);
         return total == 0 ? path.TerminalAtRest(u) is var v && double.IsNaN(v) ? 0 : v : u;
     }
 
-    /// <summary>+1 or -1 where the emf of that half-wave stands above the bus, 0 where none does.</summary>
-    private readonly int Begins(double t, double bus)
+    /// <summary>+1 or -1 where the emf of that half-wave takes over from the resting bus, 0 where none does.</summary>
+    private readonly int Begins(in BlockedStretch rest, double t)
+    {
+        var v = rest.Terminal(t, out var slope);
+        return v >= 0 ? Begins(t, v, slope) : Begins(t, 0, 0);
+    }
+
+    private readonly int Begins(double t, double bus, double slope)
     {
         if (EmfIsOff)
         {
             return 0;
         }
 
-        // A hair above, so that a stretch does not begin where one has just ended.
-        var emf = _path.Peak * Math.Sin(_path.Omega * t);
-        var needed = _path.Drop + bus + 1e-12 * _path.Peak;
-        return emf > needed ? 1 : _arrangement != RectifierArrangement.HalfWave && -emf > needed ? -1 : 0;
+        var (sin, cos) = Math.SinCos(_path.Omega * t);
+        return Takes(1, sin, cos, bus, slope) ? 1
+            : _arrangement != RectifierArrangement.HalfWave && Takes(-1, sin, cos, bus, slope) ? -1 : 0;
+    }
+
+    /// <summary>A stretch that has just ended, its load straightened, may seem to stand a hair above the bus: there it must be rising.</summary>
+    private readonly bool Takes(int sign, double sin, double cos, double bus, double slope)
+    {
+        var gap = sign * _path.Peak * sin - _path.Drop - bus;
+        return gap > 1e-12 * _path.Peak && (gap > 1e-4 * _path.Peak || sign * _path.Peak * _path.Omega * cos > slope);
     }
 
     private bool Conduct<TWatch>(double until, ref TWatch watch)
@@ -126,7 +140,7 @@ internal ref struct TransientRun
         }
 
         var both = Positive > 0 && Negative > 0;
-        var begins = Positive > 0 || Negative > 0 ? 0 : Begins(Time, Bus(U, 0));
+        var begins = Positive > 0 || Negative > 0 ? 0 : Begins(Resting, Time);
         var sign = both ? 0 : Positive > 0 || begins > 0 ? 1 : -1;
         var bus = StartBus(path);
         var load = LinearLoad.About(path, Math.Max(bus, 1e-9));
@@ -290,7 +304,7 @@ internal ref struct TransientRun
     private bool Rest<TWatch>(double until, ref TWatch watch)
         where TWatch : struct, ITransientWatch, allows ref struct
     {
-        var rest = new BlockedStretch(_load.At(_above), Time, U);
+        var rest = Resting;
         var (low, at) = (Time, until);
         while (low < until)
         {
@@ -329,7 +343,7 @@ internal ref struct TransientRun
     private readonly bool Wakes(in BlockedStretch rest, double t)
     {
         var v = rest.Terminal(t, out _);
-        return !(v >= 0) || (_above && v < _load.Threshold) || Begins(t, v) != 0;
+        return !(v >= 0) || (_above && v < _load.Threshold) || Begins(rest, t) != 0;
     }
 }
 
