@@ -1,10 +1,11 @@
 using System.Collections.Immutable;
 using Selector.Engine.Circuits;
 using Selector.Engine.Circuits.Mains;
+using Selector.Engine.Circuits.Mains.Exponential;
 
 namespace Selector.Cli.Compute;
 
-/// <summary>Rectifier with capacitor input, reference family F1, with piecewise-linear diodes.</summary>
+/// <summary>Rectifier with capacitor input, reference family F1, with piecewise-linear or exponential diodes.</summary>
 internal sealed class RectifierKind : ICaseKind
 {
     private static readonly ImmutableArray<(string Column, Func<RectifierSolution, double> Value)> Figures =
@@ -35,18 +36,20 @@ internal sealed class RectifierKind : ICaseKind
     /// <summary>The reference's diodes have 1 nS in parallel; at high voltage its loss shows.</summary>
     private const double ReferenceConductance = 1e-9;
 
+    /// <summary>The reference's exponential diodes are at 27 °C, its leakage has 2 kΩ across it.</summary>
+    private const double ReferenceTemperature = 27;
+    private const double ReferenceDamping = 2000;
+
     public string Name => "rectifier";
 
     public ImmutableArray<string> Computed { get; } = ["collapses", .. Figures.Select(f => f.Column)];
 
     public ImmutableArray<string> Solve(CaseRow row, CancellationToken cancel)
     {
-        if (row.Text("diode_model") is { Length: > 0 } model && model != "pwl")
-        {
-            throw new CaseFault($"diode_model: '{model}' is not computed yet; only pwl is.");
-        }
-
-        var status = RectifierSolver.Solve(Circuit(row), Budget.Until(cancel), out var s);
+        RectifierSolution s;
+        var status = row.Word("diode_model", ("", false), ("pwl", false), ("shockley", true))
+            ? ExponentialSolver.Solve(Exponential(row), Budget.Until(cancel), out s)
+            : RectifierSolver.Solve(Circuit(row), Budget.Until(cancel), out s);
         if (status == SolveStatus.NoOperatingPoint)
         {
             return ["1", .. Figures.Select(_ => "")];
@@ -55,6 +58,9 @@ internal sealed class RectifierKind : ICaseKind
         CaseRow.Check(status);
         return ["0", .. Figures.Select(f => CaseRow.Say(f.Value(s)))];
     }
+
+    private static ExponentialCase Exponential(CaseRow row) => new(
+        Circuit(row), new ExponentialDiode(row.Number("d_is_a"), row.Number("d_n"), row.Number("d_rs_ohm", 0), ReferenceTemperature), ReferenceDamping);
 
     internal static RectifierCase Circuit(CaseRow row) =>
         Circuit(row, row.Word("load_type", ("ci", LoadKind.Current), ("cr", LoadKind.Resistance), ("cp", LoadKind.Power)));
