@@ -8,7 +8,7 @@ namespace Selector.Cli.Compute;
 /// <summary>compute KIND CASES.csv --out RESULTS.csv</summary>
 internal sealed class ComputeCommand : Command<ComputeCommand.Settings>
 {
-    private static readonly ImmutableArray<ICaseKind> Kinds = [new RectifierKind(), new ConverterKind(), new BankKind(), new InrushKind(), new HoldUpKind()];
+    private static readonly ImmutableArray<ICaseKind> Kinds = [new RectifierKind(), new ConverterKind(), new BankKind(), new InrushKind(), new HoldUpKind(), new ReservoirKind()];
 
     public override int Execute(CommandContext context, Settings settings, CancellationToken cancellationToken)
     {
