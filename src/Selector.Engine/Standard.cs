@@ -1,5 +1,8 @@
+using Selector.Engine.Circuits.Bleeder;
 using Selector.Engine.Circuits.CurrentLimit;
 using Selector.Engine.Circuits.Direct;
+using Selector.Engine.Circuits.Events;
+using Selector.Engine.Circuits.Inlet;
 using Selector.Engine.Circuits.Life;
 using Selector.Engine.Circuits.Mains;
 using Selector.Engine.Circuits.Output;
@@ -7,6 +10,7 @@ using Selector.Engine.Circuits.Preload;
 using Selector.Engine.Circuits.Protection;
 using Selector.Engine.Circuits.Series;
 using Selector.Engine.Circuits.StepDown;
+using Selector.Engine.Circuits.Terminals;
 using Selector.Engine.Circuits.Thermal;
 using Selector.Engine.Parts.Families;
 using Selector.Engine.Supplies;
@@ -20,13 +24,18 @@ public static class Standard
         [
             new OutputStage(),
             new LifeStage(),
+            new InletStage(),
             new MainsStage(),
+            new DirectInletStage(),
             new DirectStage(),
+            new BleederStage(),
             new StepDownStage(),
             new SeriesStage(),
             new SenseStage(),
             new PreloadStage(),
+            new TerminalStage(),
             new ProtectionStage(),
+            new EventsStage(),
             new ThermalStage(),
         ],
         [

@@ -64,6 +64,12 @@ public abstract class StageModel
     /// <summary>What is drawn, plotted, measured and warned of.</summary>
     public StageView View { get; protected init; } = StageView.Empty;
 
+    /// <summary>
+    /// Dear to solve, and no other stage reads it: asked only at the conditions where one of its own stresses may be worst. It may
+    /// write no links.
+    /// </summary>
+    public bool OnDemand { get; protected init; }
+
     /// <summary>Relative error of the solver: two computations of one supply that differ by less agree.</summary>
     public double Error { get; protected init; } = 1e-6;
 

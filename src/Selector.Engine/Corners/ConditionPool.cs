@@ -62,6 +62,21 @@ public sealed class ConditionPool
         return condition;
     }
 
+    /// <summary>The same with a stress of a stage that is solved on demand only, and all of that stage, filled in.</summary>
+    /// <exception cref="OperationCanceledException">The caller no longer wants the answer.</exception>
+    public Condition At(double[] axes, int stress)
+    {
+        var condition = At(axes);
+        var stage = _model.Stresses[stress].Stage;
+        if (condition.Solved && _model.Stages[stage].OnDemand && double.IsNaN(condition.Stresses[stress])
+            && _solver.Fill(stage, condition.Axes, condition.Links, condition.Stresses, _budget) == SolveStatus.Cancelled)
+        {
+            throw new OperationCanceledException(_budget.Cancel);
+        }
+
+        return condition;
+    }
+
     /// <summary>The solved condition whose loops are likely to stand closest: an axis that switches the circuit counts most.</summary>
     private Condition? Nearest(double[] axes)
     {

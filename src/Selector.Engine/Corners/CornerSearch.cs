@@ -67,7 +67,7 @@ public sealed class CornerSearch
 
             foreach (var searchedHigh in (ReadOnlySpan<bool>)[false, true])
             {
-                var start = _pool.At(Vertex(s, severities[s], searchedHigh));
+                var start = At(s, Vertex(s, severities[s], searchedHigh));
                 if (!start.Solved)
                 {
                     failed[s] = start;
@@ -95,6 +95,12 @@ public sealed class CornerSearch
             {
                 worst[s] = found;
             }
+
+            if (worst[s] is { } none && double.IsNegativeInfinity(severities[s].Of(none)))
+            {
+                failed[s] ??= none with { Status = SolveStatus.BadInput };
+                worst[s] = null;
+            }
         }
 
         return worst;
@@ -112,7 +118,7 @@ public sealed class CornerSearch
         Condition? last = null;
         foreach (var point in _model.Stresses[stress].Spec.Profile)
         {
-            var at = _pool.At([.. _model.Axes.Select(a => point.Axes.TryGetValue(a.Id, out var value) ? value : a.Nominal)]);
+            var at = At(stress, [.. _model.Axes.Select(a => point.Axes.TryGetValue(a.Id, out var value) ? value : a.Nominal)]);
             if (!at.Solved || !(at.Stresses[stress] > 0))
             {
                 return null;
@@ -198,9 +204,9 @@ public sealed class CornerSearch
             {
                 best = Toward(stress, a, severity) switch
                 {
-                    Push.Rises => Worse(best, Moved(best, a, _model.Axes[a].Range.High), severity),
-                    Push.Falls => Worse(best, Moved(best, a, _model.Axes[a].Range.Low), severity),
-                    Push.Unproven when !asleep[a] => Along(best, a, severity, round, out asleep[a]),
+                    Push.Rises => Worse(best, Moved(stress, best, a, _model.Axes[a].Range.High), severity),
+                    Push.Falls => Worse(best, Moved(stress, best, a, _model.Axes[a].Range.Low), severity),
+                    Push.Unproven when !asleep[a] => Along(stress, best, a, severity, round, out asleep[a]),
                     _ => best,
                 };
             }
@@ -217,7 +223,7 @@ public sealed class CornerSearch
     /// <summary>The worse of the stress's own two vertices, or whatever in the pool is worse than both.</summary>
     private Condition? Start(int stress, Severity severity)
     {
-        var (low, high) = (_pool.At(Vertex(stress, severity, false)), _pool.At(Vertex(stress, severity, true)));
+        var (low, high) = (At(stress, Vertex(stress, severity, false)), At(stress, Vertex(stress, severity, true)));
         var own = !low.Solved ? high : !high.Solved || severity.Of(low) >= severity.Of(high) ? low : high;
         var found = WorstOfPool(severity);
         return own.Solved && (found is null || severity.Of(found) <= severity.Of(own) + Tie * Math.Abs(severity.Of(own))) ? own : found;
@@ -225,7 +231,7 @@ public sealed class CornerSearch
 
     /// <summary>The worst point of one searched axis through a condition.</summary>
     /// <param name="asleep">From end to end the stress hardly moves: later rounds need not ask again.</param>
-    private Condition Along(Condition through, int a, Severity severity, int round, out bool asleep)
+    private Condition Along(int stress, Condition through, int a, Severity severity, int round, out bool asleep)
     {
         var axis = _model.Axes[a];
         asleep = axis.IsFixed;
@@ -234,7 +240,7 @@ public sealed class CornerSearch
             return through;
         }
 
-        var (low, high) = (Moved(through, a, axis.Range.Low), Moved(through, a, axis.Range.High));
+        var (low, high) = (Moved(stress, through, a, axis.Range.Low), Moved(stress, through, a, axis.Range.High));
         var best = Worse(Worse(through, low, severity), high, severity);
         if (low.Solved && high.Solved)
         {
@@ -255,28 +261,28 @@ public sealed class CornerSearch
         var step = axis.Range.Width / (axis.Probes + 1.0);
         for (var probe = 1; probe <= axis.Probes; probe++)
         {
-            best = Worse(best, Moved(through, a, axis.Range.Low + probe * step), severity);
+            best = Worse(best, Moved(stress, through, a, axis.Range.Low + probe * step), severity);
         }
 
-        return Inside(best, a, step, severity);
+        return Inside(stress, best, a, step, severity);
     }
 
     /// <summary>
     /// A maximum between two ends, by parabolas through the worst point and its neighbours. At an end a parabola through the three
     /// points there, or else a small step, tells whether severity grows inwards.
     /// </summary>
-    private Condition Inside(Condition best, int a, double step, Severity severity)
+    private Condition Inside(int stress, Condition best, int a, double step, Severity severity)
     {
         var range = _model.Axes[a].Range;
         var middle = Math.Clamp(best.Axes[a], range.Low + step, range.High - step);
-        var (low, mid, high) = (Moved(best, a, middle - step), Moved(best, a, middle), Moved(best, a, middle + step));
+        var (low, mid, high) = (Moved(stress, best, a, middle - step), Moved(stress, best, a, middle), Moved(stress, best, a, middle + step));
         if (best == low && !(Top(low, mid, high, a, severity) > low.Axes[a]))
         {
-            (mid, high) = (Moved(best, a, low.Axes[a] + EndStep * range.Width), mid);
+            (mid, high) = (Moved(stress, best, a, low.Axes[a] + EndStep * range.Width), mid);
         }
         else if (best == high && !(Top(low, mid, high, a, severity) < high.Axes[a]))
         {
-            (low, mid) = (mid, Moved(best, a, high.Axes[a] - EndStep * range.Width));
+            (low, mid) = (mid, Moved(stress, best, a, high.Axes[a] - EndStep * range.Width));
         }
 
         best = Worse(best, mid, severity);
@@ -303,7 +309,7 @@ public sealed class CornerSearch
             }
 
             halved = i % 3 == 0 ? left + right : halved;
-            var found = Moved(best, a, at);
+            var found = Moved(stress, best, a, at);
             best = Worse(best, found, severity);
             if (!found.Solved)
             {
@@ -327,7 +333,7 @@ public sealed class CornerSearch
         return bend < 0 ? x - (fl + bend * dl) / (2 * bend) : double.NaN;
     }
 
-    private Condition Moved(Condition from, int axis, double value)
+    private Condition Moved(int stress, Condition from, int axis, double value)
     {
         if (from.Axes[axis] == value)
         {
@@ -336,8 +342,10 @@ public sealed class CornerSearch
 
         var axes = (double[])from.Axes.Clone();
         axes[axis] = value;
-        return _pool.At(axes);
+        return At(stress, axes);
     }
+
+    private Condition At(int stress, double[] axes) => _pool.At(axes, stress);
 
     private static Condition Worse(Condition best, Condition other, Severity severity) =>
         other.Solved && severity.Of(other) > severity.Of(best) ? other : best;

@@ -106,6 +106,12 @@ public sealed class Severity
     public double Of(Condition at, double allowed)
     {
         var stress = at.Stresses[_stress];
+        if (!double.IsFinite(stress))
+        {
+            // Of a stage that is solved on demand, and was not asked here or has no solution.
+            return double.NegativeInfinity;
+        }
+
         if (double.IsNaN(allowed))
         {
             return _spec.Side == Side.Floor ? -stress : stress;

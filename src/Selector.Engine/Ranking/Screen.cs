@@ -21,20 +21,23 @@ internal sealed class Screen
     private readonly SupplyModel _model;
     private readonly Policy _policy;
     private readonly string _position;
-    private readonly double[][] _corners;
+    private readonly (double[] Axes, int[] OnDemand)[] _corners;
 
     public Screen(SupplyModel model, Ledger now, Policy policy, string position)
     {
         _model = model;
         _policy = policy;
         _position = position;
+        var places = model.Stresses.Select((r, i) => (r, i)).ToDictionary(x => x.r.Spec.Id, x => x.i, StringComparer.Ordinal);
         _corners =
         [
             .. now.Rows
                 .Where(r => r.At.Count == model.Axes.Length)
                 .OrderByDescending(r => r.Position == position)
-                .Select(r => model.Axes.Select(a => r.At[a.Id]).ToArray())
-                .DistinctBy(a => string.Join('|', a.Select(v => v.ToString("R", System.Globalization.CultureInfo.InvariantCulture)))),
+                .GroupBy(r => string.Join('|', r.At.Values.Select(v => v.ToString("R", System.Globalization.CultureInfo.InvariantCulture))))
+                .Select(g => (
+                    model.Axes.Select(a => g.First().At[a.Id]).ToArray(),
+                    g.Select(r => places[r.Id]).Where(i => model.Stages[model.Stresses[i].Stage].OnDemand).ToArray())),
         ];
     }
 
@@ -56,9 +59,14 @@ internal sealed class Screen
             .. _model.Stresses.Select((s, i) => new Severity(_model, i, fittings.GetValueOrDefault(s.Spec.Position), _policy)),
         ];
         var worst = -1;
-        foreach (var corner in _corners)
+        foreach (var (axes, onDemand) in _corners)
         {
-            var at = pool.At(corner);
+            var at = pool.At(axes);
+            foreach (var stress in onDemand)
+            {
+                pool.At(axes, stress);
+            }
+
             for (var i = 0; at.Solved && i < margins.Length; i++)
             {
                 if (severities[i].Allowed(at) is var allowed && !double.IsNaN(allowed))

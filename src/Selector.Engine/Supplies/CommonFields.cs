@@ -49,6 +49,12 @@ public static class LinkNames
     /// <summary>Current of the preload at the output terminals, A.</summary>
     public const string PreloadCurrent = "preload.current";
 
+    /// <summary>Current of the bleeder across the reservoir, A.</summary>
+    public const string BleederCurrent = "bleeder.current";
+
+    /// <summary>Mean current from a DC source, A.</summary>
+    public const string SourceCurrent = "source.current";
+
     /// <summary>Alternating part of the regulator's input current, A rms.</summary>
     public const string RegulatorRipple = "regulator.input-ripple";
 

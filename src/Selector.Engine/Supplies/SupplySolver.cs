@@ -143,29 +143,69 @@ public sealed class SupplySolver
         for (var stage = 0; stage < _model.Stages.Length; stage++)
         {
             var spec = _model.Stages[stage];
-            var inputs = _inputs[stage];
-            var sources = _model.Wiring.Inputs(stage);
-            for (var i = 0; i < inputs.Length; i++)
+            var own = stresses.IsEmpty ? [] : stresses.Slice(firstStress, spec.Stresses.Length);
+            firstStress += spec.Stresses.Length;
+            if (spec.OnDemand)
             {
-                inputs[i] = sources[i].Kind switch
-                {
-                    InputKind.Axis => axes[sources[i].Index],
-                    InputKind.Link => links[sources[i].Index],
-                    _ => inputs[i],
-                };
+                own.Fill(double.NaN);
+                continue;
             }
 
-            var own = stresses.IsEmpty ? [] : stresses.Slice(firstStress, spec.Stresses.Length);
-            var status = spec.Solve(inputs, links.Slice(_model.Wiring.FirstLink(stage), spec.Writes.Length), own, budget);
+            var status = spec.Solve(Inputs(stage, axes, links), links.Slice(_model.Wiring.FirstLink(stage), spec.Writes.Length), own, budget);
             if (status != SolveStatus.Solved)
             {
                 return status;
             }
 
-            firstStress += spec.Stresses.Length;
+            if (!AllFinite(own))
+            {
+                return SolveStatus.BadInput;
+            }
         }
 
-        return AllFinite(links) && AllFinite(stresses) ? SolveStatus.Solved : SolveStatus.BadInput;
+        return AllFinite(links) ? SolveStatus.Solved : SolveStatus.BadInput;
+    }
+
+    /// <summary>Fills in the stresses of a stage that is solved on demand, at a condition that is solved otherwise.</summary>
+    /// <param name="stage">Which.</param>
+    /// <param name="axes">Of the condition.</param>
+    /// <param name="links">Of the condition; not written.</param>
+    /// <param name="stresses">All of the condition; those of the stage are written, as negative infinity where it has no solution.</param>
+    /// <param name="budget">Bound on work.</param>
+    public SolveStatus Fill(int stage, ReadOnlySpan<double> axes, Span<double> links, Span<double> stresses, in Budget budget)
+    {
+        var first = 0;
+        for (var s = 0; s < stage; s++)
+        {
+            first += _model.Stages[s].Stresses.Length;
+        }
+
+        var own = stresses.Slice(first, _model.Stages[stage].Stresses.Length);
+        var status = _model.Stages[stage].Solve(Inputs(stage, axes, links), [], own, budget);
+        status = status == SolveStatus.Solved && !AllFinite(own) ? SolveStatus.BadInput : status;
+        if (status != SolveStatus.Solved)
+        {
+            own.Fill(double.NegativeInfinity);
+        }
+
+        return status;
+    }
+
+    private double[] Inputs(int stage, ReadOnlySpan<double> axes, ReadOnlySpan<double> links)
+    {
+        var inputs = _inputs[stage];
+        var sources = _model.Wiring.Inputs(stage);
+        for (var i = 0; i < inputs.Length; i++)
+        {
+            inputs[i] = sources[i].Kind switch
+            {
+                InputKind.Axis => axes[sources[i].Index],
+                InputKind.Link => links[sources[i].Index],
+                _ => inputs[i],
+            };
+        }
+
+        return inputs;
     }
 
     private void Damp(Span<double> links)

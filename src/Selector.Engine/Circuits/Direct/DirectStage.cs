@@ -12,6 +12,7 @@ public sealed class DirectStage : IStage
     public const string High = "dc.high";
     public const string Resistance = "dc.resistance";
     public const string Axis = "dc";
+    public const string Diode = "protect.input";
 
     private static readonly Func<RequirementValues, bool> Shown = r => r.Is(CommonFields.Source, Output.OutputStage.SourceDirect);
 
@@ -25,6 +26,8 @@ public sealed class DirectStage : IStage
         new(Nominal, "DC, nominal", Units.Volt, new(1, 1000), "24 V", "Everyday source voltage.") { Group = "Source", Shown = Shown },
         new(High, "DC, greatest", Units.Volt, new(1, 1000), "28 V", "Highest source voltage, transients included.") { Group = "Source", Shown = Shown },
         new(Resistance, "Source resistance", Units.Ohm, new(0, 1000), "50 mΩ", "Of source and leads together.") { Group = "Source", Shown = Shown },
+        new(Diode, "Reversed source", Units.One, default, "none", "What keeps a reversed source from the reservoir.")
+            { Group = "Source", Shown = Shown, Choices = [new("none", "nothing"), new("series", "diode D7 in series")] },
     ];
 
     public ImmutableArray<FieldCheck> Checks { get; } =
@@ -36,4 +39,7 @@ public sealed class DirectStage : IStage
     public bool Applies(RequirementValues requirement) => Shown(requirement);
 
     public StageModel Build(RequirementValues requirement, ImmutableArray<StageModel> before) => new DirectModel(requirement);
+
+    /// <summary>Whether the requirement has a diode in the DC line.</summary>
+    public static bool HasDiode(RequirementValues r) => r.Is(Diode, "series");
 }

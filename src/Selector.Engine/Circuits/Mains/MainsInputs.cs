@@ -141,6 +141,28 @@ internal sealed class MainsInputs
             draw);
     }
 
+    /// <summary>Of the line, ohm.</summary>
+    public double MainsImpedance => _impedance;
+
+    /// <summary>Rms current in the primary with the working winding shorted, all of it at the temperature that the axis says, A.</summary>
+    public double FaultCurrent(ReadOnlySpan<double> x, FrontEndTopology topology)
+    {
+        var t = Transformer(x);
+        var whole = topology.Halves == 1;
+        var turns = t.Turns * (whole ? x[Halves] : 1);
+        var temperature = x[_air] + x[_winding] * Math.Max(0, x[_windingTemperature] - x[_air]);
+        var resistance = Copper.At(whole ? t.SeriesResistance : t.HalfResistance, t.MeasuredAt, temperature) / (turns * turns) + _impedance;
+        var reactance = 2 * Math.PI * x[_frequency] * t.HalfLeakage * (whole ? x[Halves] : 1) / (turns * turns);
+        return Voltage(x) / Math.Sqrt(resistance * resistance + reactance * reactance);
+    }
+
+    /// <summary>Peak of the current into an empty core with its remanence at the worst, limited by the cold primary alone on stiff mains, A: an upper bound.</summary>
+    public double CoreInrush(ReadOnlySpan<double> x, double extraResistance)
+    {
+        var t = Transformer(x);
+        return Math.Sqrt(2) * Voltage(x) / Math.Max(1e-6, Copper.At(t.Primary, t.MeasuredAt, x[_air]) + extraResistance);
+    }
+
     /// <summary>Heat in core and windings, W, and the winding's temperature once it has settled, °C.</summary>
     /// <param name="x">Inputs.</param>
     /// <param name="t">The transformer.</param>

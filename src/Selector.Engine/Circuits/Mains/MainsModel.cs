@@ -78,7 +78,6 @@ internal sealed class MainsModel : ReservoirModel
         ];
         // Against the public tables: constant power straightened over pieces of 2 % of the bus.
         Error = 1e-4;
-        NotAssessed = MainsOpenPoints.List(topology.Rectifier);
         View = new StageView(
         [
             "Mains can kill. Only a competent person may work on it: isolate, lock off, and prove dead before you touch anything.",
@@ -93,6 +92,7 @@ internal sealed class MainsModel : ReservoirModel
     [
         .. Rises("the bus follows the secondary", Mains),
         .. Falls("more power drops more in winding and diodes", DrawLink),
+        .. None("around the loop of bus and bleeder, whose gain is far below one", BleederLink),
         .. Falls("a hot winding drops more, and has the mains impedance before it", Winding),
         .. None("the rectifier sees only the mean power", InputId.Link(LinkNames.RegulatorRipple), InputId.Link(LinkNames.RegulatorFrequency)),
         .. None("a weight of the ripple rating only", [.. FrequencyMultiplier.Keys.Select(k => InputId.Column(C1, k))]),
@@ -101,7 +101,7 @@ internal sealed class MainsModel : ReservoirModel
     public override SolveStatus Solve(ReadOnlySpan<double> inputs, Span<double> links, Span<double> stresses, in Budget budget)
     {
         var transformer = _in.Transformer(inputs);
-        var circuit = _in.Circuit(inputs, transformer, _topology, CapacitanceAt(inputs), EsrAt(inputs), IsCurrent ? LoadKind.Current : LoadKind.Power, inputs[Draw]);
+        var circuit = _in.Circuit(inputs, transformer, _topology, CapacitanceAt(inputs), EsrAt(inputs), IsCurrent ? LoadKind.Current : LoadKind.Power, Draw(inputs));
         var status = RectifierSolver.Solve(
             circuit, budget, new RectifierStart(links[_start], links[_slope]), stresses.IsEmpty ? RectifierDetail.Loop : RectifierDetail.All, out var s);
         if (status != SolveStatus.Solved)

@@ -62,6 +62,7 @@ internal sealed class MainsStresses
     public static ImmutableArray<Dependence> CurrentOn(FrontEndTopology topology, InputId draw) =>
     [
         .. Rises("more power needs more current", draw),
+        .. None("around the loop of bus and bleeder, whose gain is far below one", InputId.Link(LinkNames.BleederCurrent), InputId.Link(LinkNames.Loss("R1"))),
         .. None("the rectifier sees only the mean power", InputId.Link(LinkNames.RegulatorRipple), InputId.Link(LinkNames.RegulatorFrequency)),
         .. None("around the loop of loss and temperature, whose gain is below one", InputId.Link(LinkNames.Temperature(topology.Rectifier)), InputId.Link(LinkNames.Temperature(T1))),
         .. None("a weight of the reservoir's rating only", [.. FrequencyMultiplier.Keys.Select(k => InputId.Column("C1", k))]),

@@ -71,7 +71,6 @@ public sealed class OutputStage : IStage
                     Math.Clamp(25, r[CommonFields.AmbientLow], r[CommonFields.AmbientHigh]),
                     v => QuantityWriter.Write(v, Units.Celsius)) { Probes = 0 },
             ];
-            NotAssessed = [new("J2", "output terminals, continuous and shorted current")];
         }
 
         private static Interval LeastOutput(RequirementValues r) =>

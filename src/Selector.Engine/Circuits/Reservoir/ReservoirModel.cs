@@ -18,6 +18,7 @@ public abstract class ReservoirModel : StageModel
     private const double EverydayEfficiency = 0.8;
     private const double LinearEfficiency = 0.55;
 
+    private readonly int _draw, _bleeder;
     private readonly int _capacitance;
     private readonly int _tolerance;
     private readonly int _esr;
@@ -44,7 +45,9 @@ public abstract class ReservoirModel : StageModel
         _localRise = Surroundings.LocalRise(r);
         IsCurrent = r.Is(CommonFields.Regulation, CommonFields.Linear);
         DrawLink = InputId.Link(IsCurrent ? LinkNames.RegulatorCurrent : LinkNames.RegulatorPower);
-        Draw = Read(DrawLink);
+        _draw = Read(DrawLink);
+        BleederLink = InputId.Link(IsCurrent ? LinkNames.BleederCurrent : LinkNames.Loss("R1"));
+        _bleeder = Read(BleederLink);
         RippleIn = Read(InputId.Link(LinkNames.RegulatorRipple));
         FrequencyIn = Read(InputId.Link(LinkNames.RegulatorFrequency));
         _esrCold = Read(InputId.Column(C1, CapacitorFamily.EsrCold), ColdEsr.Usual);
@@ -94,8 +97,13 @@ public abstract class ReservoirModel : StageModel
     /// <summary>What the regulator draws: a current in A or a power in W.</summary>
     protected InputId DrawLink { get; }
 
+    /// <summary>What the bleeder draws, in the same unit.</summary>
+    protected InputId BleederLink { get; }
+
+    /// <summary>What regulator and bleeder draw together, A or W.</summary>
+    protected double Draw(ReadOnlySpan<double> inputs) => inputs[_draw] + inputs[_bleeder];
+
     /// <summary>Places of the links that the regulator writes.</summary>
-    protected int Draw { get; }
 
     protected int RippleIn { get; }
 
