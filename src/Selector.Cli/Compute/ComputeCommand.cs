@@ -47,7 +47,7 @@ internal sealed class ComputeCommand : Command<ComputeCommand.Settings>
     internal sealed class Settings : CommandSettings
     {
         [CommandArgument(0, "<KIND>")]
-        [Description("rectifier, converter or bank")]
+        [Description("rectifier, converter, bank, inrush, holdup or reservoir")]
         public required string Kind { get; init; }
 
         [CommandArgument(1, "<CASES>")]

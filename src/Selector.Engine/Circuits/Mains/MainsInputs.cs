@@ -1,3 +1,4 @@
+using Selector.Engine.Circuits.Inlet;
 using Selector.Engine.Circuits.Thermal;
 using Selector.Engine.Parts.Families;
 using Selector.Engine.Supplies;
@@ -36,6 +37,7 @@ internal sealed class MainsInputs
     private readonly int _threshold;
     private readonly int _drift;
     private readonly int _slope;
+    private readonly int _limiterCold = -1, _limiterHot, _limiterMax, _current;
     private readonly int _capacitive;
     private readonly int _junction;
 
@@ -67,6 +69,14 @@ internal sealed class MainsInputs
         _windingMax = read(InputId.Column(T1, TransformerFamily.WindingMax), LeastWindingLimit);
         _windingRise = read(InputId.Column(T1, TransformerFamily.WindingRise), 0);
         _windingTemperature = read(InputId.Link(LinkNames.Temperature(T1)), null);
+        if (InletStage.HasLimiter(r))
+        {
+            _limiterCold = read(InputId.Column(InletPositions.RT1, LimiterFamily.Cold), null);
+            _limiterHot = read(InputId.Column(InletPositions.RT1, LimiterFamily.Hot), null);
+            _limiterMax = read(InputId.Column(InletPositions.RT1, LimiterFamily.Current), null);
+            _current = read(InputId.Link(LinkNames.MainsCurrent), null);
+        }
+
         _threshold = read(InputId.Column(topology.Rectifier, RectifierRatings.Threshold), null);
         _drift = read(InputId.Column(topology.Rectifier, RectifierRatings.ThresholdDrift), 0);
         _slope = read(InputId.Column(topology.Rectifier, RectifierRatings.Slope), null);
@@ -131,7 +141,7 @@ internal sealed class MainsInputs
             topology.Arrangement,
             x[_frequency],
             t.Voltage * halves * EmfFactor(x),
-            Copper.At(resistance, t.MeasuredAt, temperature) + x[_winding] * _impedance * turns * turns,
+            Copper.At(resistance, t.MeasuredAt, temperature) + x[_winding] * (_impedance + Limiter(x)) * turns * turns,
             t.HalfLeakage * halves * (t.LeakageIsKnown ? 1 : x[_winding]),
             Math.Max(0, x[_threshold] + x[_drift] * (x[_junction] - 25)),
             x[_slope],
@@ -140,6 +150,10 @@ internal sealed class MainsInputs
             kind,
             draw);
     }
+
+    /// <summary>The inrush limiter as the steady current keeps it warm, ohm; 0 without one.</summary>
+    private double Limiter(ReadOnlySpan<double> x) => _limiterCold < 0 ? 0
+        : LimiterLaw.Steady(x[_limiterHot], x[_limiterMax], x[_limiterCold], x[_current]);
 
     /// <summary>Of the line, ohm.</summary>
     public double MainsImpedance => _impedance;
