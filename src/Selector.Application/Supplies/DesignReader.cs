@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using Selector.Engine.Circuits;
 using Selector.Engine.Parts;
 using Selector.Engine.Supplies;
 
@@ -16,15 +17,15 @@ public static class DesignReader
     {
         ArgumentNullException.ThrowIfNull(state);
         var design = new Design(state.Requirement, Design.Empty.Fittings);
-        var families = Families(registry, state.Requirement);
+        var places = Places(registry, state.Requirement);
         var faults = ImmutableArray.CreateBuilder<string>();
         foreach (var (field, text) in state.Texts.Where(t => SupplyFields.IsFit(t.Key)))
         {
             var position = SupplyFields.PositionOf(field);
             var (fitting, fault) = FittingText.Parse(text, catalogue, registry);
-            if (fault is null && fitting is not null && families.TryGetValue(position, out var family) && fitting.Part.Family.Id != family)
+            if (fault is null && fitting is not null && places.TryGetValue(position, out var place) && !place.Takes(fitting.Part))
             {
-                fault = $"{fitting.Part.FullName} is a {fitting.Part.Family.Name}; the position takes a {registry.Family(family).Name}. Choose another.";
+                fault = $"{fitting.Part.FullName} is a {Kind(fitting.Part.Family, [fitting.Part.Technology])}; the position takes a {Kind(registry.Family(place.Family), place.Technologies)}. Choose another.";
             }
 
             if (fault is not null)
@@ -40,12 +41,16 @@ public static class DesignReader
         return new DesignReading(design, faults.ToImmutable());
     }
 
-    /// <summary>Family by position; empty while the requirement has faults, since then there are no positions.</summary>
-    private static Dictionary<string, string> Families(Registry registry, Requirement requirement)
+    /// <summary>Positions by name; none while the requirement has faults.</summary>
+    private static Dictionary<string, PositionSpec> Places(Registry registry, Requirement requirement)
     {
         var values = RequirementReader.Read(registry, requirement);
         return values.Ok
-            ? SupplyModel.Build(registry, values).Positions.ToDictionary(p => p.Id, p => p.Family, StringComparer.Ordinal)
+            ? SupplyModel.Build(registry, values).Positions.ToDictionary(p => p.Id, StringComparer.Ordinal)
             : [];
     }
+
+    /// <summary>"connector", or "connector (terminal)" where the technology tells kinds of use apart.</summary>
+    private static string Kind(FamilySpec family, ImmutableArray<string> technologies) =>
+        family.Technologies.Length > 1 && !technologies.IsEmpty && technologies[0].Length > 0 ? $"{family.Name} ({string.Join(" or ", technologies)})" : family.Name;
 }

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using Selector.Engine.Parts;
 
 namespace Selector.Engine.Circuits;
 
@@ -13,6 +14,12 @@ namespace Selector.Engine.Circuits;
 /// </param>
 public sealed record PositionSpec(string Id, string Role, string Family, int Quantity, ImmutableDictionary<string, double> StandIn)
 {
+    /// <summary>Technologies of the family that suit the place; empty for all.</summary>
+    public ImmutableArray<string> Technologies { get; init; } = [];
+
+    /// <summary>Whether a part may stand here, whatever its ratings.</summary>
+    public bool Takes(Part part) => part.Family.Id == Family && (Technologies.IsEmpty || Technologies.Contains(part.Technology));
+
     /// <summary>Why the stand-in has these values, for the sheet.</summary>
     public string StandInReason { get; init; } = "";
 }

@@ -119,12 +119,13 @@ public sealed class CornerSearch
         foreach (var point in _model.Stresses[stress].Spec.Profile)
         {
             var at = At(stress, [.. _model.Axes.Select(a => point.Axes.TryGetValue(a.Id, out var value) ? value : a.Nominal)]);
-            if (!at.Solved || !(at.Stresses[stress] > 0))
+            if (!at.Solved)
             {
                 return null;
             }
 
-            sum += point.Share / at.Stresses[stress];
+            // What has no life at one of them has none at all.
+            sum += at.Stresses[stress] > 0 ? point.Share / at.Stresses[stress] : double.PositiveInfinity;
             last = at;
         }
 

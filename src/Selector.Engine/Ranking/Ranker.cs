@@ -31,7 +31,8 @@ public static class Ranker
         Policy policy,
         CancellationToken cancel)
     {
-        var trials = parts.SelectMany(Arrangements.Of).ToArray();
+        var spec = model.Positions[model.PositionOrdinal(position)];
+        var trials = parts.Where(spec.Takes).SelectMany(Arrangements.Of).ToArray();
         var least = model.Requirement[CommonFields.LeastMargin];
         var options = new ParallelOptions { CancellationToken = cancel };
         var screen = new Screen(model, Assessor.Assess(model, fittings, policy, Budget.Until(cancel)), policy, position);
@@ -49,7 +50,6 @@ public static class Ranker
         });
 
         var moved = MovedRows([.. ledgers.OfType<Ledger>()], position);
-        var spec = model.Positions[model.PositionOrdinal(position)];
         var candidates = trials
             .Select((t, i) => ledgers[i] is { } ledger ? Assessed(model, spec, t, ledger, moved) : ScreenedOut(model, spec, t, found[i], least))
             .Order(CandidateOrder.Best);
@@ -59,11 +59,14 @@ public static class Ranker
     /// <summary>Rows at other positions whose margin differs from candidate to candidate.</summary>
     private static HashSet<string> MovedRows(IReadOnlyList<Ledger> ledgers, string position) => ledgers
         .SelectMany(l => l.Rows)
-        .Where(r => r.Position != position && r.Margin is not null)
+        .Where(r => r.Position != position && Counts(r))
         .GroupBy(r => r.Id, StringComparer.Ordinal)
         .Where(g => g.Max(r => r.Margin) - g.Min(r => r.Margin) > Moved)
         .Select(g => g.Key)
         .ToHashSet(StringComparer.Ordinal);
+
+    /// <summary>What an empty position asks for is a matter of the part that will fill it.</summary>
+    private static bool Counts(LedgerRow row) => row.Margin is not null && row.Verdict != Verdict.NoPart;
 
     private static Candidate Assessed(SupplyModel model, PositionSpec spec, Fitting trial, Ledger ledger, HashSet<string> moved)
     {
@@ -71,7 +74,7 @@ public static class Ranker
             .Where(r => r.Verdict != Verdict.NotAssessed).ToImmutableArray();
         var limiting = own.Where(r => r.Margin is not null).MinBy(r => r.Margin);
         var elsewhere = ledger.Rows
-            .Where(r => r.Position != spec.Id && r.Margin is not null && moved.Contains(r.Id))
+            .Where(r => r.Position != spec.Id && Counts(r) && moved.Contains(r.Id))
             .MinBy(r => r.Margin);
         var (standing, reason) = Stand(own, limiting, elsewhere, model.Requirement[CommonFields.LeastMargin]);
         var order = Order(model, spec, trial);

@@ -57,7 +57,7 @@ internal sealed class DirectInletModel : StageModel
             "I²t = C V² / 2 (R_source + ESR) / share left by the number of switchings") { On = melt, Others = Push.None });
         ImmutableArray<PositionSpec> always =
         [
-            new(J1, "DC inlet", ConnectorFamily.Id, 1, ImmutableDictionary<string, double>.Empty),
+            new(J1, "DC inlet", ConnectorFamily.Id, 1, ImmutableDictionary<string, double>.Empty) { Technologies = [ConnectorFamily.Terminal] },
             new(F1, "fuse in the DC line", FuseFamily.Id, 1, ImmutableDictionary<string, double>.Empty
                 .Add(FuseFamily.Current, 2 * r[CommonFields.OutputVoltage] * r[CommonFields.LoadFull] / r[DirectStage.Low]).Add(FuseFamily.OpensAt, 2.75)) { StandInReason = "twice the output power over the least source" },
         ];

@@ -57,7 +57,7 @@ internal sealed class DirectModel : ReservoirModel
             },
             .. DirectStage.HasDiode(r)
                 ? [new PositionSpec(D7, "diode against reversal", DiodeFamily.Id, 1, ImmutableDictionary<string, double>.Empty
-                    .Add(RectifierRatings.Threshold, 0.4).Add(RectifierRatings.Slope, 0.03).Add(RectifierRatings.Cooling, 40)) { StandInReason = "0.4 V and 30 mΩ" }]
+                    .Add(RectifierRatings.Threshold, 0.4).Add(RectifierRatings.Slope, 0.03).Add(RectifierRatings.Cooling, 40).Add(RectifierRatings.CaseCooling, 5)) { StandInReason = "0.4 V and 30 mΩ" }]
                 : ImmutableArray<PositionSpec>.Empty,
         ];
         View = new StageView(["The reservoir stays charged after the source is gone: discharge it and prove it dead."]);

@@ -56,8 +56,8 @@ internal sealed class InletModel : StageModel
             { On = [.. Rises("it is the fuse", InputId.Column(F1, FuseFamily.Current))], Others = Push.None, IsMatch = true });
         _holderCurrent = Carries(XF1, "current", "current, rms", new Bound.Rating(FuseHolderFamily.Current), carries);
         _holderVoltage = Nominal(XF1, FuseHolderFamily.Voltage);
-        _holderPower = Stress(new(XF1, "power", "heat of the link", Units.Watt, Side.Ceiling, new Bound.Rating(FuseHolderFamily.Power), "P = loss of F1 at its rated current")
-            { On = [.. Rises("it is the link's", InputId.Column(F1, FuseFamily.Loss))], Others = Push.None });
+        _holderPower = Stress(new(XF1, "power", "heat of the link", Units.Watt, Side.Ceiling, new Bound.Rating(FuseHolderFamily.Power), "P = P_rated (I / I_n)² of F1")
+            { On = [.. carries, .. Rises("it is the link's", InputId.Column(F1, FuseFamily.Loss)), .. Falls("a larger link is cooler", InputId.Column(F1, FuseFamily.Current))], Others = Push.None });
         if (InletStage.HasLimiter(r))
         {
             _limiter = Carries(RT1, "steady-current", "current, rms", new Bound.Rating(LimiterFamily.Current), carries);
@@ -87,7 +87,7 @@ internal sealed class InletModel : StageModel
         stresses[_breaking] = volts / Math.Max(1e-3, _transformer.MainsImpedance);
         stresses[_clears] = x[_opensAt] * x[_fuse] / Math.Max(1e-9, _transformer.FaultCurrent(x, _topology));
         stresses[_largest] = x[_fuse];
-        stresses[_holderPower] = x[_loss];
+        stresses[_holderPower] = x[_loss] * current * current / (x[_fuse] * x[_fuse]);
         if (_limiter >= 0)
         {
             stresses[_limiter] = current;

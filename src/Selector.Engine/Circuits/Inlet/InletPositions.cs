@@ -24,7 +24,7 @@ internal static class InletPositions
         var current = ApparentOverOutput * r[CommonFields.OutputVoltage] * r[CommonFields.LoadFull] / r[MainsStage.Voltage];
         ImmutableArray<PositionSpec> always =
         [
-            new(J1, "mains inlet", ConnectorFamily.Id, 1, none),
+            new(J1, "mains inlet", ConnectorFamily.Id, 1, none) { Technologies = [ConnectorFamily.Inlet] },
             new(S1, "mains switch", SwitchFamily.Id, 1, none),
             new(F1, "primary fuse", FuseFamily.Id, 1, none
                 .Add(FuseFamily.Current, 1.6 * current).Add(FuseFamily.OpensAt, 2.75).Add(FuseFamily.Loss, 1.6))

@@ -34,6 +34,7 @@ internal static class MainsStandIn
             .Add(RectifierRatings.Threshold, TypicalDrop)
             .Add(RectifierRatings.Slope, 0.04)
             .Add(RectifierRatings.Cooling, 30)
+            .Add(RectifierRatings.CaseCooling, 3)
             .Add(BridgeFamily.Basis, BridgeFamily.BasisOutput))
     {
         StandInReason = "0.8 V and 40 mΩ a diode",

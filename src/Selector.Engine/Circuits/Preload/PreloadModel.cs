@@ -14,7 +14,7 @@ internal sealed class PreloadModel : StageModel
     /// <summary>Share of full load that a preload draws as a starting value.</summary>
     private const double StartShare = 0.01;
 
-    private readonly int _output, _short, _resistance, _tolerance;
+    private readonly int _output, _short, _resistance, _count, _tolerance;
     private readonly int _current, _loss;
     private readonly int _power, _voltage;
 
@@ -24,6 +24,7 @@ internal sealed class PreloadModel : StageModel
         _output = Read(output);
         _short = Read(shorted);
         _resistance = Read(resistance);
+        _count = Read(InputId.Count(R10));
         _tolerance = Read(InputId.Column(R10, ResistorFamily.Tolerance), 0.05);
         ImmutableArray<Dependence> on = [.. Rises("I = V / R", output), .. Falls("I = V / R", resistance), .. Falls("nothing when shorted", shorted)];
         _current = Write(new(LinkNames.PreloadCurrent, Units.Ampere, StartShare * r[CommonFields.LoadFull], [.. on]) { Others = Push.None });
@@ -42,8 +43,8 @@ internal sealed class PreloadModel : StageModel
     public override SolveStatus Solve(ReadOnlySpan<double> inputs, Span<double> links, Span<double> stresses, in Budget budget)
     {
         var volts = inputs[_short] > 0.5 ? 0 : inputs[_output];
-        links[_current] = volts / inputs[_resistance];
-        links[_loss] = volts * volts / inputs[_resistance];
+        links[_current] = volts * inputs[_count] / inputs[_resistance];
+        links[_loss] = volts * volts * inputs[_count] / inputs[_resistance];
         if (!stresses.IsEmpty)
         {
             stresses[_power] = volts * volts / (inputs[_resistance] * (1 - Math.Min(0.99, inputs[_tolerance])));

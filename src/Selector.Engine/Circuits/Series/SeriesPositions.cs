@@ -13,6 +13,7 @@ internal static class SeriesPositions
             .Add(LinearRegulatorFamily.LimitMin, 1.2 * r[CommonFields.LoadFull])
             .Add(LinearRegulatorFamily.LimitMax, 1.5 * r[CommonFields.LoadFull])
             .Add(LinearRegulatorFamily.Drop, 2)
+            .Add(LinearRegulatorFamily.Rejection, 1000)
             .Add(LinearRegulatorFamily.CaseCooling, 4)
             .Add(LinearRegulatorFamily.Cooling, 60))
         {

@@ -24,12 +24,12 @@ internal static class StepDownPositions
         [
             new(U1, "step-down regulator", RegulatorFamily.Id, 1, Ratings(
                 (RegulatorFamily.Frequency, Frequency), (RegulatorFamily.Drop, 0), (RegulatorFamily.Resistance, 0.15 / Math.Max(1, amperes / 2)),
-                (RegulatorFamily.LimitMax, 2 * amperes), (RegulatorFamily.OnTimeMin, 200e-9), (RegulatorFamily.Cooling, 35)))
+                (RegulatorFamily.LimitMax, 2 * amperes), (RegulatorFamily.OnTimeMin, 200e-9), (RegulatorFamily.Cooling, 35), (RegulatorFamily.CaseCooling, 3)))
             {
                 StandInReason = "100 kHz, limit at twice the full load",
             },
             new(D5, "catch diode", DiodeFamily.Id, 1, Ratings(
-                (RectifierRatings.Threshold, 0.4), (RectifierRatings.Slope, 0.1 / amperes), (RectifierRatings.Cooling, 30)))
+                (RectifierRatings.Threshold, 0.4), (RectifierRatings.Slope, 0.1 / amperes), (RectifierRatings.Cooling, 30), (RectifierRatings.CaseCooling, 3)))
             {
                 StandInReason = "0.5 V at full load",
             },

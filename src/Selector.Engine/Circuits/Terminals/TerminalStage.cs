@@ -36,7 +36,7 @@ public sealed class TerminalStage : IStage
             _current = Stress(new(J2, "current", "current, load or short", Units.Ampere, Side.Ceiling, new Bound.Rating(ConnectorFamily.Current), "I = load, or what a short draws")
                 { On = [.. Rises("it is that current", current)], Others = Push.None });
             _voltage = Stress(new(J2, "voltage", "voltage between contacts", Units.Volt, Side.Ceiling, new Bound.Limit(ConnectorFamily.Voltage), "V = greatest output") { Others = Push.None, IsMatch = true });
-            Positions = [new(J2, "output terminals", ConnectorFamily.Id, 1, ImmutableDictionary<string, double>.Empty)];
+            Positions = [new(J2, "output terminals", ConnectorFamily.Id, 1, ImmutableDictionary<string, double>.Empty) { Technologies = [ConnectorFamily.Terminal] }];
         }
 
         public override SolveStatus Solve(ReadOnlySpan<double> inputs, Span<double> links, Span<double> stresses, in Budget budget)

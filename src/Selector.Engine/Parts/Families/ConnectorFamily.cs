@@ -6,6 +6,8 @@ namespace Selector.Engine.Parts.Families;
 public static class ConnectorFamily
 {
     public const string Id = "connector";
+    public const string Inlet = "mains inlet";
+    public const string Terminal = "terminal";
     public const string Current = "current";
     public const string Voltage = "voltage";
     public const string Contacts = "contacts";
@@ -23,6 +25,6 @@ public static class ConnectorFamily
         new(TemperatureMax, "upper temperature", Units.Celsius, Range.Degrees, "Ambient at which no current is left."),
     ])
     {
-        Technologies = ["mains inlet", "terminal"],
+        Technologies = [Inlet, Terminal],
     };
 }
