@@ -35,7 +35,8 @@ public static class Standard
             new PreloadStage(),
             new TerminalStage(),
             new ProtectionStage(),
-            new EventsStage(),
+            new SwitchOnStage(),
+            new HoldUpStage(),
             new ThermalStage(),
         ],
         [

@@ -28,7 +28,10 @@ public sealed class CornerSearch
     private const double Tie = 1e-6;
 
     /// <summary>Relative change from end to end below which an axis is not searched further: a tenth of what the corner is stated to.</summary>
-    private const double Asleep = 1e-5;
+    private const double Asleep = 2e-5;
+
+    /// <summary>Share of what is allowed below which a stress decides nothing: its own two vertices are corner enough.</summary>
+    private const double Slight = 0.03;
 
     /// <summary>Relative change below which an axis is not mentioned in words.</summary>
     private const double Felt = 1e-3;
@@ -195,6 +198,11 @@ public sealed class CornerSearch
         if (Start(stress, severity) is not { } best)
         {
             return null;
+        }
+
+        if (severity.IsBounded(best) && severity.Of(best) < Slight)
+        {
+            return best;
         }
 
         Span<bool> asleep = stackalloc bool[_model.Axes.Length];

@@ -99,6 +99,9 @@ public sealed class Severity
         return t <= knee ? Rating : t >= zero ? 0 : Rating * (zero - t) / (zero - knee);
     }
 
+    /// <summary>Whether there is a bound at a condition, so that severity is a share of what is allowed.</summary>
+    public bool IsBounded(Condition at) => !double.IsNaN(Allowed(at));
+
     /// <summary>Larger is worse; finite, or positive infinity where nothing is allowed.</summary>
     public double Of(Condition at) => Of(at, Allowed(at));
 

@@ -52,7 +52,8 @@ public static class Units
     public static readonly Unit Metre = new("m", "metre", UnitScale.Plain, "m", "m", "metre", "meter");
     public static readonly Unit Joule = new("J", "joule", UnitScale.Prefixed, "j", "joule", "joules", "Ws");
     public static readonly Unit WattPerKelvin = new("W/K", "watt per kelvin", UnitScale.Prefixed, "w_per_k", "W/K", "W/°C");
-    public static readonly Unit Coulomb = new("C", "coulomb", UnitScale.Prefixed, "coulomb", "C", "coulomb", "As");
+    // Written in ampere seconds: a C already means the degree.
+    public static readonly Unit Coulomb = new("As", "ampere second", UnitScale.Prefixed, "coulomb", "As", "coulomb");
     public static readonly Unit Percent = new("%", "per cent", UnitScale.Percent, "frac", "percent", "per cent", "pct");
     public static readonly Unit One = new("", "number", UnitScale.Plain, "n");
 

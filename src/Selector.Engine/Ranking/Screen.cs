@@ -15,12 +15,13 @@ internal sealed class Screen
     /// <summary>A trial that lacks by this much is not looked at further.</summary>
     private const double Hopeless = -0.5;
 
-    /// <summary>Stresses at other positions that are searched for with a trial: only the tightest decides.</summary>
-    private const int TightestElsewhere = 3;
+    /// <summary>Stresses at other positions that a trial can move and that are searched for with it: only the tightest decides.</summary>
+    private const int TightestElsewhere = 4;
 
     private readonly SupplyModel _model;
     private readonly Policy _policy;
     private readonly string _position;
+    private readonly int _ordinal;
     private readonly (double[] Axes, int[] OnDemand)[] _corners;
 
     public Screen(SupplyModel model, Ledger now, Policy policy, string position)
@@ -28,6 +29,7 @@ internal sealed class Screen
         _model = model;
         _policy = policy;
         _position = position;
+        _ordinal = model.PositionOrdinal(position);
         var places = model.Stresses.Select((r, i) => (r, i)).ToDictionary(x => x.r.Spec.Id, x => x.i, StringComparer.Ordinal);
         _corners =
         [
@@ -82,10 +84,13 @@ internal sealed class Screen
             }
         }
 
-        var tightest = Enumerable.Range(0, margins.Length).Where(i => !IsOwn(i)).OrderBy(i => margins[i]).Take(TightestElsewhere);
+        var tightest = Enumerable.Range(0, margins.Length).Where(i => !IsOwn(i) && IsMoved(i)).OrderBy(i => margins[i]).Take(TightestElsewhere);
         var focus = Enumerable.Range(0, margins.Length).Where(IsOwn).Concat(tightest).ToHashSet();
         return new Finding(pool, worst < 0 ? null : margins[worst], worst < 0 ? null : _model.Stresses[worst].Spec, focus);
     }
+
+    /// <summary>Whether the value of a stress elsewhere rests on any rating of the position's part.</summary>
+    private bool IsMoved(int stress) => _model.Directions.RatingsOf(stress).Any(r => r.Position == _ordinal);
 
     private bool IsOwn(int stress) => _model.Stresses[stress].Spec.Position == _position;
 }

@@ -15,6 +15,9 @@ public class ClimbingTests(ITestOutputHelper output)
     private const double Allowed = 1e-4;
     private const int Starts = 3;
 
+    /// <summary>Severity, the share of what is allowed, below which a stress decides nothing: there 1e-4 of this is the bound.</summary>
+    private const double Slight = 0.05;
+
     public static TheoryData<int> Seeds()
     {
         var data = new TheoryData<int>();
@@ -57,7 +60,7 @@ public class ClimbingTests(ITestOutputHelper output)
                 var found = Climb(model, pool, severities[s], random);
                 var (limit, value) = (severities[s].Of(stated), found is null ? double.NegativeInfinity : severities[s].Of(found));
                 Assert.True(
-                    double.IsInfinity(limit) || value <= limit + Allowed * Math.Abs(limit) + 1e-12,
+                    double.IsInfinity(limit) || value <= limit + Allowed * Math.Max(Math.Abs(limit), Slight),
                     $"seed {seed}: {model.Stresses[s].Spec.Id} {value:R} exceeds {limit:R} at {Say(model, found!)} stated {Say(model, stated)}");
             }
         }

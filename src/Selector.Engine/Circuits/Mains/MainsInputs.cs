@@ -41,7 +41,11 @@ internal sealed class MainsInputs
     private readonly int _capacitive;
     private readonly int _junction;
 
-    public MainsInputs(Func<InputId, double?, int> read, RequirementValues r, FrontEndTopology topology)
+    /// <param name="read">Declares an input of the stage.</param>
+    /// <param name="r">The requirement.</param>
+    /// <param name="topology">Of the front end.</param>
+    /// <param name="coldStart">Whether everything is still as cold as the room, and no limiter has warmed.</param>
+    public MainsInputs(Func<InputId, double?, int> read, RequirementValues r, FrontEndTopology topology, bool coldStart = false)
     {
         _nominal = r[MainsStage.Voltage];
         _nominalFrequency = r[MainsStage.Frequency];
@@ -50,7 +54,8 @@ internal sealed class MainsInputs
         _mains = read(InputId.Axis(MainsStage.MainsAxis), null);
         _frequency = read(InputId.Axis(MainsStage.FrequencyAxis), null);
         _winding = read(InputId.Axis(MainsStage.WindingAxis), null);
-        _air = read(Surroundings.Air(r), null);
+        var room = InputId.Axis(CommonFields.AmbientAxis);
+        _air = read(coldStart ? room : Surroundings.Air(r), null);
         Primary = _firstOfTransformer = read(InputId.Column(T1, TransformerFamily.Primary), null);
         Halves = read(InputId.Column(T1, TransformerFamily.Halves), null);
         read(InputId.Column(T1, TransformerFamily.NoLoad), 0);
@@ -68,8 +73,8 @@ internal sealed class MainsInputs
         FrequencyMin = read(InputId.Column(T1, TransformerFamily.FrequencyMin), _nominalFrequency);
         _windingMax = read(InputId.Column(T1, TransformerFamily.WindingMax), LeastWindingLimit);
         _windingRise = read(InputId.Column(T1, TransformerFamily.WindingRise), 0);
-        _windingTemperature = read(InputId.Link(LinkNames.Temperature(T1)), null);
-        if (InletStage.HasLimiter(r))
+        _windingTemperature = read(coldStart ? room : InputId.Link(LinkNames.Temperature(T1)), null);
+        if (InletStage.HasLimiter(r) && !coldStart)
         {
             _limiterCold = read(InputId.Column(InletPositions.RT1, LimiterFamily.Cold), null);
             _limiterHot = read(InputId.Column(InletPositions.RT1, LimiterFamily.Hot), null);
@@ -81,7 +86,7 @@ internal sealed class MainsInputs
         _drift = read(InputId.Column(topology.Rectifier, RectifierRatings.ThresholdDrift), 0);
         _slope = read(InputId.Column(topology.Rectifier, RectifierRatings.Slope), null);
         _capacitive = read(InputId.Column(topology.Rectifier, RectifierRatings.CapacitiveFactor), 1);
-        _junction = read(InputId.Link(LinkNames.Temperature(topology.Rectifier)), null);
+        _junction = read(coldStart ? room : InputId.Link(LinkNames.Temperature(topology.Rectifier)), null);
         Basis = topology.Family == BridgeFamily.Id ? read(InputId.Column(topology.Rectifier, BridgeFamily.Basis), null) : -1;
     }
 

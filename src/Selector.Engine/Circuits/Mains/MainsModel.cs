@@ -115,7 +115,7 @@ internal sealed class MainsModel : ReservoirModel
         links[_loss] = s.DiodeLoss * _topology.DiodesInPart;
         links[_current] = _in.PrimaryCurrent(inputs, transformer, _topology, s.SecondaryRms);
         (links[_transformerLoss], links[_winding]) = _in.Heat(inputs, transformer, s.WindingLoss);
-        links[_slopeOfLoss] = _in.Drift(inputs) * s.DiodeAverage * _topology.DiodesInPart;
+        links[_slopeOfLoss] = Math.Max(0, _in.Drift(inputs)) * s.DiodeAverage * _topology.DiodesInPart;
         if (!stresses.IsEmpty)
         {
             // No loop runs through the extremes of the bus: they are only asked for once the loops are closed.

@@ -69,7 +69,7 @@ public sealed class OutputStage : IStage
                     CommonFields.AmbientAxis,
                     new(r[CommonFields.AmbientLow], r[CommonFields.AmbientHigh]),
                     Math.Clamp(25, r[CommonFields.AmbientLow], r[CommonFields.AmbientHigh]),
-                    v => QuantityWriter.Write(v, Units.Celsius)) { Probes = 0 },
+                    v => QuantityWriter.Write(v, Units.Celsius)) { Probes = 2 },
             ];
         }
 

@@ -34,7 +34,7 @@ internal sealed class BypassCapacitor
         _voltage = stress(new(C3, "voltage", "voltage, ripple peak included", Units.Volt, Side.Ceiling, new Bound.Rating(FilmCapacitorFamily.Voltage), "V = greatest bus voltage")
             { On = [.. Rises("it is the top of the bus", InputId.Link(LinkNames.BusMax))], Others = Push.None });
         _ripple = stress(new(C3, "ripple-current", "switching ripple, rms", Units.Ampere, Side.Ceiling, new Bound.Rating(FilmCapacitorFamily.Ripple),
-            "I = √( Σ (I_k |Z1 / (Z1 + Z3)|)² ), I_k the harmonics of the pulses that U1 draws") { On = [.. StepDownModel.OutputCapacitorHardly] });
+            "I = √( Σ (I_k |Z1 / (Z1 + Z3)|)² ), I_k the harmonics of the pulses that U1 draws, from the second on at their greatest") );
         var air = Surroundings.Air(r);
         _temperature = stress(new(C3, "temperature", "air at its place", Units.Celsius, Side.Temperature, new Bound.Rating(FilmCapacitorFamily.TemperatureMax), "T = T_air")
             { On = [.. Rises("it is the air around it", air)], Others = Push.None });
@@ -57,7 +57,9 @@ internal sealed class BypassCapacitor
         for (var k = 1; k <= Harmonics; k++)
         {
             var omega = 2 * Math.PI * frequency * k;
-            var current = Math.Sqrt(2) * height * Math.Abs(Math.Sin(k * Math.PI * duty)) / (k * Math.PI);
+            // A harmonic that meets the resonance of the two capacitors hangs on the duty by a hair: from the second on its greatest counts.
+            var sine = k == 1 ? Math.Sin(Math.PI * duty) : 1;
+            var current = Math.Sqrt(2) * height * sine / (k * Math.PI);
             var own = new Complex(x[_esr], -1 / (omega * capacitance));
             var other = new Complex(0.5 * x[_reservoirEsr], omega * x[_reservoirEsl] - 1 / (omega * x[_reservoir]));
             var part = current * Complex.Abs(other) / Math.Max(1e-9, Complex.Abs(own + other));

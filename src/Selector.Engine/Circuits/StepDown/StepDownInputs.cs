@@ -161,12 +161,15 @@ internal sealed class StepDownInputs
     public double LeakageLoss(ReadOnlySpan<double> x, double bus, double duty) =>
         x[_leakage] * Math.Pow(2, Math.Clamp((x[_diodeTemperature] - x[_leakageAt]) / 10, -30, 30)) * bus * duty;
 
-    /// <summary>How fast the diode's loss grows with its junction, W/K: leakage by its doubling, the threshold by its drift.</summary>
+    /// <summary>
+    /// How fast the diode's loss grows with its junction, W/K: leakage by its doubling, the threshold by its drift where it rises; a
+    /// falling threshold, which steadies the loop, is not counted on.
+    /// </summary>
     public double DiodeLossSlope(ReadOnlySpan<double> x, double leakageLoss, double mean) =>
-        leakageLoss * Math.Log(2) / 10 + x[_thresholdDrift] * mean;
+        leakageLoss * Math.Log(2) / 10 + Math.Max(0, x[_thresholdDrift]) * mean;
 
     /// <summary>How fast the switch's loss grows with its junction, W/K.</summary>
-    public double SwitchLossSlope(ReadOnlySpan<double> x, double rms) => x[_resistance] * x[_resistanceDrift] * rms * rms;
+    public double SwitchLossSlope(ReadOnlySpan<double> x, double rms) => x[_resistance] * Math.Max(0, x[_resistanceDrift]) * rms * rms;
 
     /// <summary>
     /// Coil temperature, °C: the maker's rise at rated current tells what a watt of loss does, and the core's watts do as much.

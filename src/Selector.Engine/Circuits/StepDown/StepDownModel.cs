@@ -29,18 +29,18 @@ internal sealed class StepDownModel : StageModel
         _full = r[CommonFields.LoadFull];
         _in = new StepDownInputs(Read, r);
         _power = Write(new(LinkNames.RegulatorPower, Units.Watt, 0.1 * r[CommonFields.OutputVoltage] * _full,
-            [.. Rises("more load, more power", Load, Output), .. OutputCapacitorHardly, .. BusLoop, .. Heat]));
+            [.. Rises("more load, more power", Load, Output), .. BusLoop, .. Heat]));
         _ripple = Write(new(LinkNames.RegulatorRipple, Units.Ampere, _full / 2));
         _frequency = Write(new(LinkNames.RegulatorFrequency, Units.Hertz, 1e5,
             [new Dependence(InputId.Axis(CommonFields.ShortAxis), Push.Unproven, "a part may lower its frequency when shorted")]) { Others = Push.None });
         _current = Write(new(LinkNames.OutputCurrent, Units.Ampere, _full,
-            [.. Rises("it is the load", Load), .. OutputCapacitorHardly]));
+            [.. Rises("it is the load", Load)]));
         _switchLoss = Write(new(LinkNames.Loss(U1), Units.Watt, 0.1, [.. Rises("more load, more loss", Load)]));
         _diodeLoss = Write(new(LinkNames.Loss(D5), Units.Watt, 0.1, [.. Rises("more load, more loss", Load)]));
-        _coilTemperature = Write(new(LinkNames.Temperature(L1), Units.Celsius, 40, [.. Rises("more load, more current", Load), .. OutputCapacitorHardly]));
-        _coilLoss = Write(new(LinkNames.Loss(L1), Units.Watt, 0.1, [.. Rises("more load, more current", Load), .. OutputCapacitorHardly]));
+        _coilTemperature = Write(new(LinkNames.Temperature(L1), Units.Celsius, 40, [.. Rises("more load, more current", Load)]));
+        _coilLoss = Write(new(LinkNames.Loss(L1), Units.Watt, 0.1, [.. Rises("more load, more current", Load)]));
         _switchSlope = Write(new(LinkNames.LossSlope(U1), Units.WattPerKelvin, 0, [.. Rises("more load, more loss", Load)]));
-        _diodeSlope = Write(new(LinkNames.LossSlope(D5), Units.WattPerKelvin, 0, [.. OutputCapacitorHardly]));
+        _diodeSlope = Write(new(LinkNames.LossSlope(D5), Units.WattPerKelvin, 0, []));
         OtherLosses = [new(LinkNames.Loss(L1))];
         _stress = new StepDownStresses(Stress, r);
         _window = new StepDownWindow(Stress, r);
@@ -48,7 +48,7 @@ internal sealed class StepDownModel : StageModel
         Positions = List(r);
         Axes =
         [
-            new(StepDownStage.InductanceAxis, new(-1, 1), 0, v => v <= -1 ? "L1 low" : v >= 1 ? "L1 high" : "") { Probes = 0 },
+            new(StepDownStage.InductanceAxis, new(-1, 1), 0, v => v <= -1 ? "L1 low" : v >= 1 ? "L1 high" : "") { Probes = 1 },
             .. ReservoirCapacitor.Axes(C2),
         ];
         Heats =
@@ -67,11 +67,6 @@ internal sealed class StepDownModel : StageModel
         ];
         NotAssessed = OpenPoints;
     }
-
-    /// <summary>The output capacitor reaches the coil only through the ripple of the output, some thousandths of the voltage across it.</summary>
-    internal static IEnumerable<Dependence> OutputCapacitorHardly => None(
-        "only through the output ripple, some thousandths of the voltage across the coil",
-        InputId.Axis(ReservoirCapacitor.CapacitanceAxis(C2)), InputId.Axis(ReservoirCapacitor.EsrAxis(C2)));
 
     private static IEnumerable<Dependence> BusLoop => None(
         "around the loop of bus and power, whose gain is below one: it cannot turn a sign",

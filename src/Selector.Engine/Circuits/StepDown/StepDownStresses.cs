@@ -54,14 +54,14 @@ internal sealed class StepDownStresses
         _reverse = stress(new(D5, "reverse-voltage", "reverse voltage", Units.Volt, Side.Ceiling, new Bound.Rating(RectifierRatings.Reverse), "V = greatest bus voltage, the closed switch without drop")
             { On = [.. Rises("it is the top of the bus", BusMax)], Others = Push.None });
         _average = stress(new(D5, "average-current", "average current", Units.Ampere, Side.Ceiling, new Bound.Rating(RectifierRatings.Average), "I = mean of the coil current while the switch is open")
-            { On = [.. Rises("more load, more current", Load), .. NotAt(BusMin, BusMean), .. StepDownModel.OutputCapacitorHardly] });
+            { On = [.. Rises("more load, more current", Load), .. NotAt(BusMin, BusMean)] });
         _peak = stress(new(D5, "repetitive-peak", "repetitive peak current", Units.Ampere, Side.Ceiling, new Bound.Rating(RectifierRatings.Peak), "I = top of the coil current")
-            { On = [.. Rises("more load, more current", Load), .. NotAt(BusMin, BusMean), .. StepDownModel.OutputCapacitorHardly] });
+            { On = [.. Rises("more load, more current", Load), .. NotAt(BusMin, BusMean)] });
         _saturation = stress(new(L1, "saturation-current", "peak current in load", Units.Ampere, Side.Ceiling, new Bound.Rating(InductorFamily.Saturation), "I = (I_load + ΔI / 2) over the share of the rating left hot") { On = SaturationOn });
         _saturationShort = stress(new(L1, "saturation-current-short", "peak current in a short", Units.Ampere, Side.Ceiling, new Bound.Rating(InductorFamily.Saturation), "I = greatest limit of U1, or what its least on-time lets through, over the share of the rating left hot")
-            { On = [.. Rises("only there", Short), .. None("no load in a short", Load), .. NotAt(BusMin, BusMean), .. StepDownModel.OutputCapacitorHardly] });
+            { On = [.. Rises("only there", Short), .. None("no load in a short", Load), .. NotAt(BusMin, BusMean)] });
         _rms = stress(new(L1, "rms-current", "rms current", Units.Ampere, Side.Ceiling, new Bound.Rating(InductorFamily.Rms), "I = √( mean of i² )")
-            { On = [.. Rises("more load, more current", Load), .. NotAt(BusMin, BusMean), .. StepDownModel.OutputCapacitorHardly] });
+            { On = [.. Rises("more load, more current", Load), .. NotAt(BusMin, BusMean)] });
         _coil = stress(new(L1, "temperature", "coil", Units.Celsius, Side.Temperature, new Bound.Rating(InductorFamily.TemperatureMax), "T = T_air + ΔT_rated (P_copper + P_core) / P_rated")
         {
             On = [.. Rises("it is that temperature", InputId.Link(LinkNames.Temperature(L1)))], Others = Push.None,
@@ -69,7 +69,7 @@ internal sealed class StepDownStresses
         });
         _voltage = stress(new(C2, "voltage", "voltage, ripple peak included", Units.Volt, Side.Ceiling, new Bound.Rating(CapacitorFamily.Voltage), "V = V_out + I R_series + ripple above the mean") { On = Ripple });
         _ripple = stress(new(C2, "ripple-current", "ripple current, weighted", Units.Ampere, Side.Ceiling, new Bound.Rating(CapacitorFamily.Ripple), "I = I_C / m(f_sw)")
-            { Needs = [ReservoirCapacitor.RippleTable(C2, "multiplier_10k", 1e4)], On = [.. Ripple, .. StepDownModel.OutputCapacitorHardly] });
+            { Needs = [ReservoirCapacitor.RippleTable(C2, "multiplier_10k", 1e4)], On = [.. Ripple] });
         _outputRipple = stress(new(C2, "output-ripple", "output ripple, peak to peak", Units.Volt, Side.Ceiling, new Bound.Required(r[CommonFields.OutputRipple], CommonFields.OutputRipple), "ΔV at the terminals of C2 with ESR and ESL, exact") { On = Ripple, Needs = [new Need(C2, CapacitorFamily.Esl, "without its series inductance")] });
         _life = stress(new(C2, "life", "life over the load profile, at least", Units.Hour, Side.Floor, LifeFields.Bound(r), LifeFields.Equation)
         {
@@ -86,7 +86,7 @@ internal sealed class StepDownStresses
     private static ImmutableArray<Dependence> Peak =>
     [
         .. Rises("the peak rides on the load", Load), .. Falls("less inductance, more ripple", Inductance), .. Falls("of the supply in load", Short),
-        .. Rises("more input, more ripple for the same output", BusMax), .. NotAt(BusMin, BusMean), .. StepDownModel.OutputCapacitorHardly,
+        .. Rises("more input, more ripple for the same output", BusMax), .. NotAt(BusMin, BusMean),
     ];
 
     private static ImmutableArray<Dependence> Ripple =>

@@ -18,14 +18,17 @@ public readonly record struct Enclosure(double Width, double Height, double Dept
     private const double Vertical = 1.42;
     private const double FacingUp = 1.32;
 
-    /// <summary>Hottest wall that is looked for above the room, K.</summary>
-    private const double Hottest = 5000;
+    private const int MostNewton = 30;
 
     private double Sides => 2 * Height * (Width + Depth);
 
     private double Top => Width * Depth;
 
     private double TopLength => 2 * Width * Depth / (Width + Depth);
+
+    /// <summary>Heat by convection at a difference of one kelvin, W; it goes with the power of 1.25.</summary>
+    private double Convecting => Math.Sqrt(Pressure)
+        * (Sides * Vertical / Math.Pow(Height, 0.25) + Top * FacingUp / Math.Pow(TopLength, 0.25));
 
     /// <summary>Rise of the air inside over the room, K.</summary>
     /// <param name="power">W, at least 0.</param>
@@ -37,33 +40,35 @@ public readonly record struct Enclosure(double Width, double Height, double Dept
             return 0;
         }
 
-        var box = this;
-        var wall = Root(rise => box.Outside(rise, ambient) - power);
-        return wall + Root(rise => box.Convection(rise) - power);
+        // Without radiation the walls would be hotter than they are: from there Newton's method on a rising, convex law falls to the root.
+        var convecting = Convecting;
+        var film = Math.Pow(power / convecting, 0.8);
+        var wall = film;
+        for (var i = 0; i < MostNewton; i++)
+        {
+            var convected = convecting * Math.Pow(wall, 1.25);
+            var radiated = (Sides + Top) * Radiation(wall, ambient) * wall;
+            var step = (convected + radiated - power) / ((1.25 * convected + radiated) / wall);
+            wall -= step;
+            if (step <= 1e-10 * wall)
+            {
+                break;
+            }
+        }
+
+        return wall + film;
     }
 
     /// <summary>Heat that the walls give off at a rise over the room, W.</summary>
-    public double Outside(double rise, double ambient)
-    {
-        var (room, wall) = (ambient + Kelvin, ambient + rise + Kelvin);
-        var radiation = Emissivity * StefanBoltzmann * (wall * wall + room * room) * (wall + room);
-        return Convection(rise) + (Sides + Top) * radiation * rise;
-    }
+    public double Outside(double rise, double ambient) => Convection(rise) + (Sides + Top) * Radiation(rise, ambient) * rise;
 
     /// <summary>Heat by convection at a difference between air and walls, W.</summary>
-    public double Convection(double difference) => Math.Sqrt(Pressure) * difference
-        * (Sides * Vertical * Math.Pow(difference / Height, 0.25) + Top * FacingUp * Math.Pow(difference / TopLength, 0.25));
+    public double Convection(double difference) => Convecting * Math.Pow(difference, 1.25);
 
-    /// <summary>Both laws rise steadily: halving the interval finds the one root.</summary>
-    private static double Root(Func<double, double> excess)
+    /// <summary>W/(m² K).</summary>
+    private double Radiation(double rise, double ambient)
     {
-        var (low, high) = (0.0, Hottest);
-        for (var i = 0; i < 60 && high - low > 1e-9 * high; i++)
-        {
-            var middle = (low + high) / 2;
-            (low, high) = excess(middle) < 0 ? (middle, high) : (low, middle);
-        }
-
-        return (low + high) / 2;
+        var (room, wall) = (ambient + Kelvin, ambient + rise + Kelvin);
+        return Emissivity * StefanBoltzmann * (wall * wall + room * room) * (wall + room);
     }
 }

@@ -125,7 +125,7 @@ internal sealed class ThermalModel : StageModel
                 if (j.Gain >= 0)
                 {
                     var whole = resistance + (j.OnSink ? j.Quantity * inputs[_sinkCooling] : 0);
-                    stresses[j.Gain] = Math.Max(0, whole * inputs[j.Slope]);
+                    stresses[j.Gain] = whole * inputs[j.Slope];
                 }
             }
         }

@@ -59,6 +59,21 @@ public static class HoldUpSolver
         return status != SolveStatus.Solved ? status : solution.IsFinite ? SolveStatus.Solved : SolveStatus.NoOperatingPoint;
     }
 
+    /// <summary>Only the least bus when half a cycle is missed, V.</summary>
+    public static SolveStatus LeastInHalf(in RectifierCase circuit, in Budget budget, out double least)
+    {
+        least = 0;
+        var status = RectifierSolver.Solve(circuit, budget, out var steady);
+        if (status != SolveStatus.Solved || steady.PulseEnd <= steady.PulseStart)
+        {
+            return status == SolveStatus.Solved ? SolveStatus.NoOperatingPoint : status;
+        }
+
+        status = After(new HoldUpCase(circuit, steady.BusMin), steady, 0.5 / circuit.Frequency, 1.5, false, budget, out var watch, out _);
+        least = watch.Least;
+        return status != SolveStatus.Solved || double.IsFinite(least) ? status : SolveStatus.NoOperatingPoint;
+    }
+
     private static SolveStatus After(
         in HoldUpCase c, in RectifierSolution steady, double off, double cycles, bool untilLockOut, in Budget budget, out HoldUpWatch watch, out double voltage)
     {

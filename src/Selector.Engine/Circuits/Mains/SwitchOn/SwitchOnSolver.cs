@@ -18,6 +18,7 @@ public static class SwitchOnSolver
 
     private const double Degree = Math.PI / 180;
     private const double Coarse = 5 * Degree;
+    private const double Fine = 0.02 * Degree;
 
     /// <summary>
     /// Solves at the phase that the case states. BadInput outside the ranges of <see cref="RectifierCase"/>; NoOperatingPoint when
@@ -84,7 +85,10 @@ public static class SwitchOnSolver
     /// Phase with the largest current in the first line cycle (1.6 cycles for a half wave), rad: looked for every five degrees, then
     /// closed in on.
     /// </summary>
-    public static SolveStatus WorstPhase(in SwitchOnCase c, in Budget budget, out double phase)
+    public static SolveStatus WorstPhase(in SwitchOnCase c, in Budget budget, out double phase) => WorstPhase(c, Coarse, Fine, budget, out phase);
+
+    /// <summary>The same with other steps: the peak is flat there, so that a degree costs less than a thousandth of it.</summary>
+    internal static SolveStatus WorstPhase(in SwitchOnCase c, double coarse, double fine, in Budget budget, out double phase)
     {
         phase = 0;
         if (!c.Circuit.IsInRange || !(c.LoadFrom >= 0))
@@ -94,7 +98,7 @@ public static class SwitchOnSolver
 
         var whole = c.Circuit.Arrangement == RectifierArrangement.HalfWave ? 2 * Math.PI : Math.PI;
         var (best, highest) = (0.0, double.NegativeInfinity);
-        for (var p = 0.0; p < whole - Coarse / 2; p += Coarse)
+        for (var p = 0.0; p < whole - coarse / 2; p += coarse)
         {
             if (Peak(c, p, budget) is var peak && peak > highest)
             {
@@ -102,10 +106,10 @@ public static class SwitchOnSolver
             }
         }
 
-        var (low, high) = (best - Coarse, best + Coarse);
+        var (low, high) = (best - coarse, best + coarse);
         var (a, b) = (low + 0.381966011 * (high - low), high - 0.381966011 * (high - low));
         var (fa, fb) = (Peak(c, a, budget), Peak(c, b, budget));
-        for (var i = 0; i < 24 && high - low > 0.02 * Degree; i++)
+        for (var i = 0; i < 24 && high - low > fine; i++)
         {
             if (fa > fb)
             {

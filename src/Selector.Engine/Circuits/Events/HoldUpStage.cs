@@ -5,16 +5,16 @@ using Selector.Engine.Supplies;
 
 namespace Selector.Engine.Circuits.Events;
 
-/// <summary>Switch-on with an empty reservoir, and the mains failing for half a cycle: solved only where they may be worst.</summary>
-public sealed class EventsStage : IStage
+/// <summary>The mains failing for half a cycle: solved only where it may be worst.</summary>
+public sealed class HoldUpStage : IStage
 {
     public const string HoldUp = "hold-up";
 
     private static readonly Func<RequirementValues, bool> Shown = r => r.Is(CommonFields.Source, OutputStage.SourceMains);
 
-    public string Id => "events";
+    public string Id => "hold-up";
 
-    public string Name => "switch-on and hold-up";
+    public string Name => "hold-up";
 
     public ImmutableArray<FieldSpec> Fields { get; } =
     [
@@ -24,7 +24,7 @@ public sealed class EventsStage : IStage
 
     public ImmutableArray<FieldCheck> Checks => [];
 
-    public bool Applies(RequirementValues requirement) => Shown(requirement);
+    public bool Applies(RequirementValues requirement) => Shown(requirement) && requirement.Is(HoldUp, "half");
 
-    public StageModel Build(RequirementValues requirement, ImmutableArray<StageModel> before) => new EventsModel(requirement);
+    public StageModel Build(RequirementValues requirement, ImmutableArray<StageModel> before) => new HoldUpModel(requirement);
 }

@@ -2,10 +2,8 @@ using System.Collections.Immutable;
 using Selector.Engine.Circuits.Inlet;
 using Selector.Engine.Circuits.Life;
 using Selector.Engine.Circuits.Mains;
-using Selector.Engine.Circuits.Mains.HoldUp;
 using Selector.Engine.Circuits.Mains.SwitchOn;
 using Selector.Engine.Circuits.Reservoir;
-using Selector.Engine.Circuits.Thermal;
 using Selector.Engine.Parts.Families;
 using Selector.Engine.Quantities;
 using Selector.Engine.Supplies;
@@ -13,15 +11,16 @@ using static Selector.Engine.Circuits.Dependences;
 
 namespace Selector.Engine.Circuits.Events;
 
-/// <summary>Stresses of fuse, switch, rectifier and limiter at switch-on, and the valley of a missed half-cycle.</summary>
-internal sealed class EventsModel : StageModel
+/// <summary>Stresses of fuse, switch, rectifier and limiter at switch-on with an empty reservoir.</summary>
+internal sealed class SwitchOnModel : StageModel
 {
     private const string C1 = "C1";
-    private const string U1 = "U1";
     private const string F1 = InletPositions.F1;
     private const string S1 = InletPositions.S1;
     private const string RT1 = InletPositions.RT1;
     private const int Train = 24;
+    private const double CoarsePhase = Math.PI / 12;
+    private const double FinePhase = Math.PI / 180;
 
     /// <summary>Surges that follow each other count by the fourth root of their place. Common practice, no source.</summary>
     private const double TrainExponent = 0.25;
@@ -33,28 +32,26 @@ internal sealed class EventsModel : StageModel
     private readonly MainsInputs _in;
     private readonly double _switchings;
     private readonly double _fullCurrent, _bus;
-    private readonly bool _hasLimiter, _linear;
+    private readonly bool _hasLimiter;
     private readonly int _capacitance, _tolerance, _esr, _place, _esrPlace, _air, _cold, _beta, _hot, _restart;
-    private readonly int _draw, _needed, _neededDrop, _output, _load, _series;
-    private readonly int _surge, _integral, _melting, _core, _contacts, _energy = -1, _holdUp = -1;
+    private readonly int _surge, _integral, _melting, _core, _contacts, _energy = -1;
 
-    public EventsModel(RequirementValues r)
+    public SwitchOnModel(RequirementValues r)
     {
         OnDemand = true;
         _topology = FrontEndTopology.Of(r);
         _switchings = r[LifeStage.Switchings];
         _bus = MainsStandIn.Bus(r);
         _fullCurrent = r[CommonFields.OutputVoltage] * r[CommonFields.LoadFull] / 0.8 / _bus;
-        _linear = r.Is(CommonFields.Regulation, CommonFields.Linear);
         _hasLimiter = InletStage.HasLimiter(r);
-        _in = new MainsInputs(Read, r, _topology);
+        _in = new MainsInputs(Read, r, _topology, coldStart: true);
         var (capacitance, place, esrPlace) = (InputId.Column(C1, CapacitorFamily.Capacitance), InputId.Axis(ReservoirCapacitor.CapacitanceAxis(C1)), InputId.Axis(ReservoirCapacitor.EsrAxis(C1)));
         _capacitance = Read(capacitance);
         _tolerance = Read(InputId.Column(C1, CapacitorFamily.Tolerance), 0.2);
         _esr = Read(InputId.Column(C1, CapacitorFamily.EsrLow));
         _place = Read(place);
         _esrPlace = Read(esrPlace);
-        _air = Read(Surroundings.Air(r));
+        _air = Read(InputId.Axis(CommonFields.AmbientAxis));
         var restart = InputId.Axis(InletStage.RestartAxis);
         if (_hasLimiter)
         {
@@ -70,7 +67,6 @@ internal sealed class EventsModel : StageModel
             .. Rises("it drives the charge", InputId.Axis(MainsStage.MainsAxis)), .. Rises("more charge", capacitance, place),
             .. Falls("cold copper and stiff mains limit less", InputId.Axis(MainsStage.WindingAxis)), .. Falls("in the way of the charge", esrPlace),
             .. _hasLimiter ? Rises("a hot limiter limits little", restart) : [],
-            .. None("at switch-on every part is as cold as the air", InputId.Link(LinkNames.Temperature("T1")), InputId.Link(LinkNames.Temperature(_topology.Rectifier))),
         ];
         var d = _topology.Rectifier;
         _surge = Stress(new(d, "surge-current", "surge at switch-on", Units.Ampere, Side.Ceiling, new Bound.Rating(RectifierRatings.Surge),
@@ -80,32 +76,13 @@ internal sealed class EventsModel : StageModel
         _melting = Stress(new(F1, "melting-integral", "melting integral that switch-on asks for", Units.AmpereSquaredSecond, Side.Ceiling, new Bound.Rating(FuseFamily.Melting),
             "I²t = n² Σ ∫ i² dt of the charging pulses / share left by the number of switchings") { On = on });
         _core = Stress(new(F1, "core-inrush", "melting integral that core inrush asks for, at most", Units.AmpereSquaredSecond, Side.Ceiling, new Bound.Rating(FuseFamily.Melting),
-            "I²t = ( √2 V / R_primary )² / 4 f / share left by the number of switchings") { On = Core(on, r), Others = Push.None });
+            "I²t = ( √2 V / R_primary )² / 4 f / share left by the number of switchings") { On = Core(on), Others = Push.None });
         _contacts = Stress(new(S1, "inrush-current", "peak at switch-on, charge or core", Units.Ampere, Side.Ceiling, new Bound.Rating(SwitchFamily.Inrush),
             "I = greater of n i_peak and √2 V / R_primary") { On = on });
         if (_hasLimiter)
         {
             _energy = Stress(new(RT1, "energy", "heat of one cold start", Units.Joule, Side.Ceiling, new Bound.Rating(LimiterFamily.Energy),
                 "E = C V² / 2, as if all of it stayed in the limiter") { On = [.. on.Where(x => x.Input != restart), .. None("of a cold start", restart)] });
-        }
-
-        if (r.Is(EventsStage.HoldUp, "half"))
-        {
-            _draw = Read(InputId.Link(_linear ? LinkNames.RegulatorCurrent : LinkNames.RegulatorPower));
-            _needed = Read(InputId.Column(U1, _linear ? LinearRegulatorFamily.Drop : RegulatorFamily.InputMin));
-            _neededDrop = _linear ? Read(InputId.Column(U1, LinearRegulatorFamily.DropResistance), 0) : -1;
-            _output = Read(InputId.Axis(CommonFields.OutputAxis));
-            _load = Read(InputId.Axis(CommonFields.LoadAxis));
-            _series = Read(InputId.Link(LinkNames.SeriesResistance));
-            _holdUp = Stress(new(C1, "hold-up", "least input needed over valley of a missed half-cycle", Units.Percent, Side.Ceiling, new Bound.Required(1, EventsStage.HoldUp),
-                "s = V_needed / V_valley of the solved transient")
-            {
-                On =
-                [
-                    .. Falls("it charges the reservoir", InputId.Axis(MainsStage.MainsAxis)), .. Rises("it draws the reservoir down", InputId.Link(_linear ? LinkNames.RegulatorCurrent : LinkNames.RegulatorPower)),
-                    .. Falls("more charge", place), .. Rises("more draw", InputId.Axis(CommonFields.LoadAxis), InputId.Axis(CommonFields.OutputAxis)),
-                ],
-            });
         }
     }
 
@@ -133,14 +110,14 @@ internal sealed class EventsModel : StageModel
             stresses[_energy] = capacitance * volts * volts / 2;
         }
 
-        return _holdUp < 0 ? SolveStatus.Solved : WriteHoldUp(x, circuit, stresses, budget);
+        return SolveStatus.Solved;
     }
 
     private SolveStatus SwitchOn(in RectifierCase circuit, double turns, double limiter, Span<double> stresses, out double peak, in Budget budget)
     {
         peak = 0;
         var c = new SwitchOnCase(circuit with { WindingResistance = circuit.WindingResistance + limiter * turns * turns }, 0, StartShare * _bus);
-        var status = SwitchOnSolver.WorstPhase(c, budget, out var phase);
+        var status = SwitchOnSolver.WorstPhase(c, CoarsePhase, FinePhase, budget, out var phase);
         Span<SwitchOnPulse> train = stackalloc SwitchOnPulse[Train];
         train.Clear();
         status = status == SolveStatus.Solved ? SwitchOnSolver.Solve(c with { Phase = phase }, train, budget, out _) : status;
@@ -164,26 +141,10 @@ internal sealed class EventsModel : StageModel
         return SolveStatus.Solved;
     }
 
-    private SolveStatus WriteHoldUp(ReadOnlySpan<double> x, in RectifierCase circuit, Span<double> stresses, in Budget budget)
-    {
-        var needed = _linear ? x[_output] + x[_load] * x[_series] + x[_needed] + x[_neededDrop] * x[_load] : x[_needed];
-        var loaded = circuit with { LoadKind = _linear ? LoadKind.Current : LoadKind.Power, Load = x[_draw] };
-        if (loaded.Load <= 0)
-        {
-            stresses[_holdUp] = 0;
-            return SolveStatus.Solved;
-        }
-
-        var status = HoldUpSolver.Solve(new HoldUpCase(loaded, needed), budget, out var s);
-        stresses[_holdUp] = status != SolveStatus.Solved ? 100 : s.LeastInHalf > 0.01 * needed ? needed / s.LeastInHalf : 100;
-        return status == SolveStatus.NoOperatingPoint ? SolveStatus.Solved : status;
-    }
-
-    private static ImmutableArray<Dependence> Core(ImmutableArray<Dependence> on, RequirementValues r) =>
+    private static ImmutableArray<Dependence> Core(ImmutableArray<Dependence> on) =>
     [
-        .. Rises("it drives the core", InputId.Axis(MainsStage.MainsAxis)), .. Falls("longer half-waves", InputId.Axis(MainsStage.FrequencyAxis)), .. Falls("cold copper limits less", Surroundings.Air(r)),
+        .. Rises("it drives the core", InputId.Axis(MainsStage.MainsAxis)), .. Falls("longer half-waves", InputId.Axis(MainsStage.FrequencyAxis)), .. Falls("cold copper limits less", InputId.Axis(CommonFields.AmbientAxis)),
         .. on.Where(d => d.Input == InputId.Axis(InletStage.RestartAxis)),
-        .. None("the primary alone", InputId.Axis(MainsStage.WindingAxis), InputId.Axis(ReservoirCapacitor.CapacitanceAxis(C1)), InputId.Axis(ReservoirCapacitor.EsrAxis(C1)),
-            InputId.Link(LinkNames.Temperature("T1")), InputId.Column(C1, CapacitorFamily.Capacitance)),
+        .. None("the primary alone", InputId.Axis(MainsStage.WindingAxis), InputId.Axis(ReservoirCapacitor.CapacitanceAxis(C1)), InputId.Axis(ReservoirCapacitor.EsrAxis(C1)), InputId.Column(C1, CapacitorFamily.Capacitance)),
     ];
 }
