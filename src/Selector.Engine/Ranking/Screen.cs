@@ -61,9 +61,11 @@ internal sealed class Screen
             .. _model.Stresses.Select((s, i) => new Severity(_model, i, fittings.GetValueOrDefault(s.Spec.Position), _policy)),
         ];
         var worst = -1;
+        var fails = false;
         foreach (var (axes, onDemand) in _corners)
         {
             var at = pool.At(axes);
+            fails |= !at.Solved;
             foreach (var stress in onDemand)
             {
                 pool.At(axes, stress);
@@ -84,7 +86,9 @@ internal sealed class Screen
             }
         }
 
-        var tightest = Enumerable.Range(0, margins.Length).Where(i => !IsOwn(i) && IsMoved(i)).OrderBy(i => margins[i]).Take(TightestElsewhere);
+        // Where the supply has no solution with a trial, every stress that it moves is looked at: each may be the one without.
+        var tightest = Enumerable.Range(0, margins.Length).Where(i => !IsOwn(i) && IsMoved(i)).OrderBy(i => margins[i])
+            .Take(fails ? int.MaxValue : TightestElsewhere);
         var focus = Enumerable.Range(0, margins.Length).Where(IsOwn).Concat(tightest).ToHashSet();
         return new Finding(pool, worst < 0 ? null : margins[worst], worst < 0 ? null : _model.Stresses[worst].Spec, focus);
     }

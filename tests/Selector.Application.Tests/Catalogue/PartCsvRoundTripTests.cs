@@ -67,7 +67,7 @@ public sealed class PartCsvRoundTripTests
     [Fact]
     public void A_negative_number_stays_a_number()
     {
-        var file = PartCsv.Write(Resistors.Family, [Resistors.Part() with { Ratings = [1000, 0.01, 0.5, -0.002, 70, double.NaN, double.NaN] }]);
+        var file = PartCsv.Write(Resistors.Family, [Resistors.Part() with { Ratings = [1000, 0.01, 0.5, -0.002, .. Resistors.Family.Ratings.Skip(4).Select(_ => double.NaN)] }]);
         Assert.Contains(",-0.002,", file, StringComparison.Ordinal);
     }
 

@@ -59,7 +59,7 @@ internal static class DemoParts
         (ResistorFamily.PulseEnergy, 5));
 
     public static Part Bypass { get; } = TestPart.Of(FilmCapacitorFamily.Spec, "C3",
-        (FilmCapacitorFamily.Capacitance, 1e-6), (FilmCapacitorFamily.Tolerance, 0.1), (FilmCapacitorFamily.Voltage, 100), (FilmCapacitorFamily.Ripple, 3),
+        (FilmCapacitorFamily.Capacitance, 1e-6), (FilmCapacitorFamily.Tolerance, 0.1), (FilmCapacitorFamily.Voltage, 100), (FilmCapacitorFamily.Ripple, 12),
         (FilmCapacitorFamily.Esr, 0.02), (FilmCapacitorFamily.TemperatureMax, 105));
 
     public static Part Inlet { get; } = TestPart.Of(ConnectorFamily.Spec, "J",
