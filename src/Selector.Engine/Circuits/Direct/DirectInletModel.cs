@@ -29,7 +29,7 @@ internal sealed class DirectInletModel : StageModel
     public DirectInletModel(RequirementValues r)
     {
         _resistance = Math.Max(Stiffest, r[DirectStage.Resistance]);
-        _share = PulseWithstand.Share(r[LifeStage.Switchings]);
+        _share = PulseWithstand.Share(r[LifeFields.Switchings]);
         _hasDiode = DirectStage.HasDiode(r);
         var (source, current) = (InputId.Axis(DirectStage.Axis), InputId.Link(LinkNames.SourceCurrent));
         var (capacitance, place, esrPlace) = (InputId.Column(C1, CapacitorFamily.Capacitance), InputId.Axis(ReservoirCapacitor.CapacitanceAxis(C1)), InputId.Axis(ReservoirCapacitor.EsrAxis(C1)));

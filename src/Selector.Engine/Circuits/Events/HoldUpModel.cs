@@ -52,10 +52,10 @@ internal sealed class HoldUpModel : StageModel
         {
             On =
             [
-                .. Falls("it charges the reservoir", InputId.Axis(MainsStage.MainsAxis)), .. Rises("it draws the reservoir down", draw), .. Falls("more charge", place),
-                .. Rises("hot copper charges it less", InputId.Axis(MainsStage.WindingAxis)), .. Rises("in the way of the draw", esrPlace),
+                .. Falls("it charges the reservoir", InputId.Axis(MainsFields.MainsAxis)), .. Rises("it draws the reservoir down", draw), .. Falls("more charge", place),
+                .. Rises("hot copper charges it less", InputId.Axis(MainsFields.WindingAxis)), .. Rises("in the way of the draw", esrPlace),
                 .. Rises("more draw", InputId.Axis(CommonFields.LoadAxis), InputId.Axis(CommonFields.OutputAxis)), .. Rises("more drop", InputId.Link(LinkNames.SeriesResistance)),
-                new Dependence(InputId.Axis(MainsStage.FrequencyAxis), Push.Unproven, "a longer gap, but a longer charge before it"),
+                new Dependence(InputId.Axis(MainsFields.FrequencyAxis), Push.Unproven, "a longer gap, but a longer charge before it"),
                 new Dependence(Surroundings.Air(r), Push.Unproven, "cold raises the ESR and lowers the copper"),
             ],
             Others = Push.None,

@@ -40,10 +40,10 @@ internal sealed class SwitchOnModel : StageModel
     {
         OnDemand = true;
         _topology = FrontEndTopology.Of(r);
-        _switchings = r[LifeStage.Switchings];
+        _switchings = r[LifeFields.Switchings];
         _bus = MainsStandIn.Bus(r);
         _fullCurrent = r[CommonFields.OutputVoltage] * r[CommonFields.LoadFull] / 0.8 / _bus;
-        _hasLimiter = InletStage.HasLimiter(r);
+        _hasLimiter = InletFields.HasLimiter(r);
         _in = new MainsInputs(Read, r, _topology, coldStart: true);
         var (capacitance, place, esrPlace) = (InputId.Column(C1, CapacitorFamily.Capacitance), InputId.Axis(ReservoirCapacitor.CapacitanceAxis(C1)), InputId.Axis(ReservoirCapacitor.EsrAxis(C1)));
         _capacitance = Read(capacitance);
@@ -52,20 +52,20 @@ internal sealed class SwitchOnModel : StageModel
         _place = Read(place);
         _esrPlace = Read(esrPlace);
         _air = Read(InputId.Axis(CommonFields.AmbientAxis));
-        var restart = InputId.Axis(InletStage.RestartAxis);
+        var restart = InputId.Axis(InletFields.RestartAxis);
         if (_hasLimiter)
         {
             _cold = Read(InputId.Column(RT1, LimiterFamily.Cold));
             _beta = Read(InputId.Column(RT1, LimiterFamily.Beta), 3000);
             _hot = Read(InputId.Column(RT1, LimiterFamily.Hot));
             _restart = Read(restart);
-            Axes = [new(InletStage.RestartAxis, new(0, 1), 0, v => v > 0.5 ? "hot restart" : "cold start") { EndsOnly = true }];
+            Axes = [new(InletFields.RestartAxis, new(0, 1), 0, v => v > 0.5 ? "hot restart" : "cold start") { EndsOnly = true }];
         }
 
         ImmutableArray<Dependence> on =
         [
-            .. Rises("it drives the charge", InputId.Axis(MainsStage.MainsAxis)), .. Rises("more charge", capacitance, place),
-            .. Falls("cold copper and stiff mains limit less", InputId.Axis(MainsStage.WindingAxis)), .. Falls("in the way of the charge", esrPlace),
+            .. Rises("it drives the charge", InputId.Axis(MainsFields.MainsAxis)), .. Rises("more charge", capacitance, place),
+            .. Falls("cold copper and stiff mains limit less", InputId.Axis(MainsFields.WindingAxis)), .. Falls("in the way of the charge", esrPlace),
             .. _hasLimiter ? Rises("a hot limiter limits little", restart) : [],
         ];
         var d = _topology.Rectifier;
@@ -143,8 +143,8 @@ internal sealed class SwitchOnModel : StageModel
 
     private static ImmutableArray<Dependence> Core(ImmutableArray<Dependence> on) =>
     [
-        .. Rises("it drives the core", InputId.Axis(MainsStage.MainsAxis)), .. Falls("longer half-waves", InputId.Axis(MainsStage.FrequencyAxis)), .. Falls("cold copper limits less", InputId.Axis(CommonFields.AmbientAxis)),
-        .. on.Where(d => d.Input == InputId.Axis(InletStage.RestartAxis)),
-        .. None("the primary alone", InputId.Axis(MainsStage.WindingAxis), InputId.Axis(ReservoirCapacitor.CapacitanceAxis(C1)), InputId.Axis(ReservoirCapacitor.EsrAxis(C1)), InputId.Column(C1, CapacitorFamily.Capacitance)),
+        .. Rises("it drives the core", InputId.Axis(MainsFields.MainsAxis)), .. Falls("longer half-waves", InputId.Axis(MainsFields.FrequencyAxis)), .. Falls("cold copper limits less", InputId.Axis(CommonFields.AmbientAxis)),
+        .. on.Where(d => d.Input == InputId.Axis(InletFields.RestartAxis)),
+        .. None("the primary alone", InputId.Axis(MainsFields.WindingAxis), InputId.Axis(ReservoirCapacitor.CapacitanceAxis(C1)), InputId.Axis(ReservoirCapacitor.EsrAxis(C1)), InputId.Column(C1, CapacitorFamily.Capacitance)),
     ];
 }

@@ -13,7 +13,7 @@ namespace Selector.Engine.Circuits.Inlet;
 internal sealed class InletModel : StageModel
 {
     private static readonly InputId Current = InputId.Link(LinkNames.MainsCurrent);
-    private static readonly InputId Mains = InputId.Axis(MainsStage.MainsAxis);
+    private static readonly InputId Mains = InputId.Axis(MainsFields.MainsAxis);
 
     private readonly double _nominal;
     private readonly FrontEndTopology _topology;
@@ -24,7 +24,7 @@ internal sealed class InletModel : StageModel
 
     public InletModel(RequirementValues r)
     {
-        _nominal = r[MainsStage.Voltage];
+        _nominal = r[MainsFields.Voltage];
         _topology = FrontEndTopology.Of(r);
         _current = Read(Current);
         _mains = Read(Mains);
@@ -41,14 +41,14 @@ internal sealed class InletModel : StageModel
         _fuseVoltage = Nominal(F1, FuseFamily.VoltageAc);
         _breaking = Stress(new(F1, "breaking-current", "current to break, primary shorted", Units.Ampere, Side.Ceiling, new Bound.Limit(FuseFamily.BreakingAc),
             "I = V_high / Z_mains") { On = [.. Rises("it is the mains", Mains)], Others = Push.None });
-        _clears = Stress(new(F1, "fault-current", "opening current over fault current, secondary shorted", Units.Percent, Side.Ceiling, new Bound.Required(1, MainsStage.Impedance),
+        _clears = Stress(new(F1, "fault-current", "opening current over fault current, secondary shorted", Units.Percent, Side.Ceiling, new Bound.Required(1, MainsFields.Impedance),
             "s = k I_n / I_fault, I_fault = V / |Z| of the transformer, hot, behind the mains impedance")
         {
             On =
             [
-                .. Falls("it drives the fault", Mains), .. Rises("hot copper hinders it", InputId.Axis(MainsStage.WindingAxis), Surroundings.Air(r), InputId.Link(LinkNames.Temperature("T1"))),
+                .. Falls("it drives the fault", Mains), .. Rises("hot copper hinders it", InputId.Axis(MainsFields.WindingAxis), Surroundings.Air(r), InputId.Link(LinkNames.Temperature("T1"))),
                 .. Rises("it is the fuse", InputId.Column(F1, FuseFamily.Current), InputId.Column(F1, FuseFamily.OpensAt)),
-                .. Rises("more leakage", InputId.Axis(MainsStage.FrequencyAxis)),
+                .. Rises("more leakage", InputId.Axis(MainsFields.FrequencyAxis)),
             ],
             Others = Push.None,
         });
@@ -58,12 +58,12 @@ internal sealed class InletModel : StageModel
         _holderVoltage = Nominal(XF1, FuseHolderFamily.Voltage);
         _holderPower = Stress(new(XF1, "power", "heat of the link", Units.Watt, Side.Ceiling, new Bound.Rating(FuseHolderFamily.Power), "P = P_rated (I / I_n)² of F1")
             { On = [.. carries, .. Rises("it is the link's", InputId.Column(F1, FuseFamily.Loss)), .. Falls("a larger link is cooler", InputId.Column(F1, FuseFamily.Current))], Others = Push.None });
-        if (InletStage.HasLimiter(r))
+        if (InletFields.HasLimiter(r))
         {
             _limiter = Carries(RT1, "steady-current", "current, rms", new Bound.Rating(LimiterFamily.Current), carries);
         }
 
-        if (r.Is(InletStage.Varistor, "yes"))
+        if (r.Is(InletFields.Varistor, "yes"))
         {
             _varistor = Stress(new(RV1, "voltage", "highest mains", Units.Volt, Side.Ceiling, new Bound.Rating(VaristorFamily.VoltageAc), "V = greatest mains, rms")
                 { On = [.. Rises("it is the mains", Mains)], Others = Push.None });

@@ -21,7 +21,7 @@ internal static class InletPositions
     public static ImmutableArray<PositionSpec> List(RequirementValues r)
     {
         var none = ImmutableDictionary<string, double>.Empty;
-        var current = ApparentOverOutput * r[CommonFields.OutputVoltage] * r[CommonFields.LoadFull] / r[MainsStage.Voltage];
+        var current = ApparentOverOutput * r[CommonFields.OutputVoltage] * r[CommonFields.LoadFull] / r[MainsFields.Voltage];
         ImmutableArray<PositionSpec> always =
         [
             new(J1, "mains inlet", ConnectorFamily.Id, 1, none) { Technologies = [ConnectorFamily.Inlet] },
@@ -36,9 +36,9 @@ internal static class InletPositions
         return
         [
             .. always,
-            .. InletStage.HasLimiter(r) ? [new PositionSpec(RT1, "inrush limiter", LimiterFamily.Id, 1, none
+            .. InletFields.HasLimiter(r) ? [new PositionSpec(RT1, "inrush limiter", LimiterFamily.Id, 1, none
                 .Add(LimiterFamily.Cold, 10).Add(LimiterFamily.Hot, 0.5).Add(LimiterFamily.Current, 2)) { StandInReason = "10 Ω, 2 A" }] : ImmutableArray<PositionSpec>.Empty,
-            .. r.Is(InletStage.Varistor, "yes") ? [new PositionSpec(RV1, "varistor", VaristorFamily.Id, 1, none)] : ImmutableArray<PositionSpec>.Empty,
+            .. r.Is(InletFields.Varistor, "yes") ? [new PositionSpec(RV1, "varistor", VaristorFamily.Id, 1, none)] : ImmutableArray<PositionSpec>.Empty,
         ];
     }
 }

@@ -8,10 +8,6 @@ namespace Selector.Engine.Circuits.Inlet;
 /// <summary>From the mains to the transformer: inlet, switch, fuse with its holder, inrush limiter and varistor if asked.</summary>
 public sealed class InletStage : IStage
 {
-    public const string Limiter = "inlet.limiter";
-    public const string Varistor = "inlet.varistor";
-    public const string RestartAxis = "restart";
-
     private static readonly Func<RequirementValues, bool> Shown = r => r.Is(CommonFields.Source, OutputStage.SourceMains);
 
     public string Id => "inlet";
@@ -20,9 +16,9 @@ public sealed class InletStage : IStage
 
     public ImmutableArray<FieldSpec> Fields { get; } =
     [
-        new(Limiter, "Inrush limiter", Units.One, default, "none", "Whether a thermistor in the primary limits the current at switch-on.")
+        new(InletFields.Limiter, "Inrush limiter", Units.One, default, "none", "Whether a thermistor in the primary limits the current at switch-on.")
             { Group = "Source", Shown = Shown, Choices = [new("none", "none"), new("ntc", "NTC RT1")] },
-        new(Varistor, "Varistor", Units.One, default, "none", "Whether a varistor behind the fuse limits surges from the mains.")
+        new(InletFields.Varistor, "Varistor", Units.One, default, "none", "Whether a varistor behind the fuse limits surges from the mains.")
             { Group = "Source", Shown = Shown, Choices = [new("none", "none"), new("yes", "varistor RV1")] },
     ];
 
@@ -31,7 +27,4 @@ public sealed class InletStage : IStage
     public bool Applies(RequirementValues requirement) => Shown(requirement);
 
     public StageModel Build(RequirementValues requirement, ImmutableArray<StageModel> before) => new InletModel(requirement);
-
-    /// <summary>Whether the requirement has the thermistor.</summary>
-    public static bool HasLimiter(RequirementValues r) => r.Is(Limiter, "ntc");
 }

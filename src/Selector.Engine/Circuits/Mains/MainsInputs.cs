@@ -47,13 +47,13 @@ internal sealed class MainsInputs
     /// <param name="coldStart">Whether everything is still as cold as the room, and no limiter has warmed.</param>
     public MainsInputs(Func<InputId, double?, int> read, RequirementValues r, FrontEndTopology topology, bool coldStart = false)
     {
-        _nominal = r[MainsStage.Voltage];
-        _nominalFrequency = r[MainsStage.Frequency];
-        _impedance = r[MainsStage.Impedance];
-        (_low, _high) = (1 - r[MainsStage.Low], 1 + r[MainsStage.High]);
-        _mains = read(InputId.Axis(MainsStage.MainsAxis), null);
-        _frequency = read(InputId.Axis(MainsStage.FrequencyAxis), null);
-        _winding = read(InputId.Axis(MainsStage.WindingAxis), null);
+        _nominal = r[MainsFields.Voltage];
+        _nominalFrequency = r[MainsFields.Frequency];
+        _impedance = r[MainsFields.Impedance];
+        (_low, _high) = (1 - r[MainsFields.Low], 1 + r[MainsFields.High]);
+        _mains = read(InputId.Axis(MainsFields.MainsAxis), null);
+        _frequency = read(InputId.Axis(MainsFields.FrequencyAxis), null);
+        _winding = read(InputId.Axis(MainsFields.WindingAxis), null);
         var room = InputId.Axis(CommonFields.AmbientAxis);
         _air = read(coldStart ? room : Surroundings.Air(r), null);
         Primary = _firstOfTransformer = read(InputId.Column(T1, TransformerFamily.Primary), null);
@@ -74,7 +74,7 @@ internal sealed class MainsInputs
         _windingMax = read(InputId.Column(T1, TransformerFamily.WindingMax), LeastWindingLimit);
         _windingRise = read(InputId.Column(T1, TransformerFamily.WindingRise), 0);
         _windingTemperature = read(coldStart ? room : InputId.Link(LinkNames.Temperature(T1)), null);
-        if (InletStage.HasLimiter(r) && !coldStart)
+        if (InletFields.HasLimiter(r) && !coldStart)
         {
             _limiterCold = read(InputId.Column(InletPositions.RT1, LimiterFamily.Cold), null);
             _limiterHot = read(InputId.Column(InletPositions.RT1, LimiterFamily.Hot), null);

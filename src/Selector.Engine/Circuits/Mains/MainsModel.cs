@@ -14,8 +14,8 @@ internal sealed class MainsModel : ReservoirModel
 {
     private const string T1 = "T1";
 
-    private static readonly InputId Mains = InputId.Axis(MainsStage.MainsAxis);
-    private static readonly InputId Winding = InputId.Axis(MainsStage.WindingAxis);
+    private static readonly InputId Mains = InputId.Axis(MainsFields.MainsAxis);
+    private static readonly InputId Winding = InputId.Axis(MainsFields.WindingAxis);
 
     private readonly FrontEndTopology _topology;
     private readonly MainsInputs _in;
@@ -35,7 +35,7 @@ internal sealed class MainsModel : ReservoirModel
 
     private MainsModel(RequirementValues r, FrontEndTopology topology)
         : base(r, topology.PulsesPerCycle == 2 ? "multiplier_100" : "multiplier_50",
-            topology.PulsesPerCycle * r[MainsStage.Frequency] * (1 - r[MainsStage.FrequencyTolerance]))
+            topology.PulsesPerCycle * r[MainsFields.Frequency] * (1 - r[MainsFields.FrequencyTolerance]))
     {
         _topology = topology;
         _in = new MainsInputs(Read, r, topology);
@@ -54,9 +54,9 @@ internal sealed class MainsModel : ReservoirModel
         _stress = new MainsStresses(Stress, topology, r, DrawLink, BusOn);
         Axes =
         [
-            new(MainsStage.MainsAxis, new(1 - r[MainsStage.Low], 1 + r[MainsStage.High]), 1, MainsWords) { Probes = 3 },
-            Around(MainsStage.FrequencyAxis, r[MainsStage.Frequency], r[MainsStage.FrequencyTolerance]),
-            new(MainsStage.WindingAxis, new(0, 1), 0.5, v => v <= 0 ? "T1 cold" : v >= 1 ? "T1 hot" : "") { Probes = 0 },
+            new(MainsFields.MainsAxis, new(1 - r[MainsFields.Low], 1 + r[MainsFields.High]), 1, MainsWords) { Probes = 3 },
+            Around(MainsFields.FrequencyAxis, r[MainsFields.Frequency], r[MainsFields.FrequencyTolerance]),
+            new(MainsFields.WindingAxis, new(0, 1), 0.5, v => v <= 0 ? "T1 cold" : v >= 1 ? "T1 hot" : "") { Probes = 0 },
             .. ReservoirCapacitor.Axes(C1),
         ];
         Positions =

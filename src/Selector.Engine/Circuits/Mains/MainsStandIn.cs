@@ -16,10 +16,10 @@ internal static class MainsStandIn
 
     public static PositionSpec Transformer(RequirementValues r, FrontEndTopology topology, double fullPower)
     {
-        var noLoad = (Bus(r) + topology.InPath * TypicalDrop) / Math.Sqrt(2) * (1 + TypicalRegulation) / (1 - r[MainsStage.Low]);
+        var noLoad = (Bus(r) + topology.InPath * TypicalDrop) / Math.Sqrt(2) * (1 + TypicalRegulation) / (1 - r[MainsFields.Low]);
         var current = RmsOverMean * fullPower / Bus(r);
         return new PositionSpec("T1", "mains transformer", TransformerFamily.Id, 1, ImmutableDictionary<string, double>.Empty
-            .Add(TransformerFamily.Primary, r[MainsStage.Voltage])
+            .Add(TransformerFamily.Primary, r[MainsFields.Voltage])
             .Add(TransformerFamily.Halves, topology.Halves)
             .Add(TransformerFamily.NoLoad, noLoad)
             .Add(TransformerFamily.Resistance, TypicalRegulation * noLoad / current / (1 + TypicalRegulation))
@@ -42,5 +42,5 @@ internal static class MainsStandIn
 
     /// <summary>Capacitance for a ripple of a tenth of the bus, F.</summary>
     public static double Reservoir(RequirementValues r, FrontEndTopology topology, double fullPower) =>
-        fullPower / Bus(r) / (topology.PulsesPerCycle * r[MainsStage.Frequency] * 0.1 * Bus(r));
+        fullPower / Bus(r) / (topology.PulsesPerCycle * r[MainsFields.Frequency] * 0.1 * Bus(r));
 }

@@ -25,13 +25,13 @@ internal sealed class MainsStresses
 
     public MainsStresses(Func<StressSpec, int> stress, FrontEndTopology topology, RequirementValues r, InputId draw, ImmutableArray<Dependence> busOn)
     {
-        _nominal = r[MainsStage.Voltage];
-        _nominalFrequency = r[MainsStage.Frequency];
+        _nominal = r[MainsFields.Voltage];
+        _nominalFrequency = r[MainsFields.Frequency];
         var d = topology.Rectifier;
         _secondary = stress(new(T1, "secondary-current", "secondary current, rms", Units.Ampere, Side.Ceiling, new Bound.Rating(TransformerFamily.Current), "I = √( mean of i² ) of the solved pulses") { On = CurrentOn(topology, draw) });
         _primary = stress(new(T1, "primary-voltage", "nominal mains on the primary", Units.Volt, Side.Ceiling, new Bound.Limit(TransformerFamily.Primary), "V = nominal mains") { Others = Push.None, IsMatch = true });
         _frequency = stress(new(T1, "frequency", "nominal frequency, at least", Units.Hertz, Side.Floor, new Bound.Limit(TransformerFamily.FrequencyMin), "f = nominal mains frequency") { Others = Push.None, IsMatch = true });
-        _halves = stress(new(T1, "halves", "secondary halves, at least", Units.One, Side.Floor, new Bound.Required(topology.Halves, MainsStage.FrontEnd), "as the front end needs")
+        _halves = stress(new(T1, "halves", "secondary halves, at least", Units.One, Side.Floor, new Bound.Required(topology.Halves, MainsFields.FrontEnd), "as the front end needs")
         {
             On = [new Dependence(InputId.Column(T1, TransformerFamily.Halves), Push.Rises, "it is the number itself")],
             Others = Push.None,
@@ -44,7 +44,7 @@ internal sealed class MainsStresses
         {
             On =
             [
-                .. Rises("it is the mains voltage", InputId.Axis(MainsStage.MainsAxis)), .. Falls("a longer half-wave", InputId.Axis(MainsStage.FrequencyAxis)),
+                .. Rises("it is the mains voltage", InputId.Axis(MainsFields.MainsAxis)), .. Falls("a longer half-wave", InputId.Axis(MainsFields.FrequencyAxis)),
                 new Dependence(InputId.Column(T1, TransformerFamily.Primary), Push.Falls, "rated for more"),
             ],
             Others = Push.None,

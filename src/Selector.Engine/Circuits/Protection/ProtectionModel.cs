@@ -19,7 +19,7 @@ internal sealed class ProtectionModel : StageModel
 
     public ProtectionModel(RequirementValues r)
     {
-        _toInput = r.Is(ProtectionStage.Field, ProtectionStage.ToInput);
+        _toInput = r.Is(ProtectionFields.Field, ProtectionFields.ToInput);
         var output = InputId.Axis(CommonFields.OutputAxis);
         var (esr, slope) = (InputId.Column(C2, CapacitorFamily.EsrHigh), InputId.Column(D8, RectifierRatings.Slope));
         var (place, esrPlace) = (InputId.Axis(ReservoirCapacitor.CapacitanceAxis(C2)), InputId.Axis(ReservoirCapacitor.EsrAxis(C2)));

@@ -38,7 +38,7 @@ internal sealed class SeriesStresses
         _least = r.Is(CommonFields.OutputAdjust, OutputStage.Adjustable) ? r[CommonFields.OutputLeast] : _greatest;
         _leastLoad = r[CommonFields.LoadLeast];
         _full = r[CommonFields.LoadFull];
-        _hasDiode = ProtectionStage.HasOutputDiode(r) ? 1 : 0;
+        _hasDiode = ProtectionFields.HasOutputDiode(r) ? 1 : 0;
         _input = stress(new(U1, "input-voltage", "input voltage", Units.Volt, Side.Ceiling, new Bound.Rating(LinearRegulatorFamily.InputMax), "V = greatest bus voltage")
             { On = [.. Rises("it is the top of the bus", BusMax)], Others = Push.None });
         _differential = stress(new(U1, "differential-voltage", "input to output", Units.Volt, Side.Ceiling, new Bound.Rating(LinearRegulatorFamily.DifferentialMax), "V = greatest bus voltage − output; the whole bus when shorted")
