@@ -25,7 +25,7 @@ public class MainJobTests(Desk desk, ITestOutputHelper output)
         var rows = await sheet.Rows();
 
         Assert.True(rows.Count > 30);
-        Assert.All(rows, r => Assert.Equal(nameof(Verdict.Holds), r.Verdict));
+        Assert.All(rows, r => Assert.True(r.Verdict is nameof(Verdict.Holds) or nameof(Verdict.NoDemand), $"{r.Position} {r.Kind} {r.Verdict}"));
         output.WriteLine($"first page after {desk.Server.FirstPage.TotalMilliseconds:0} ms");
     }
 

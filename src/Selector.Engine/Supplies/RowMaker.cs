@@ -95,12 +95,14 @@ internal sealed class RowMaker(
 
         if (row.Margin is null)
         {
-            return row with { Verdict = Verdict.NotUsable, Reason = "nothing is allowed under these conditions" };
+            return fitted
+                ? row with { Verdict = Verdict.NotUsable, Reason = "nothing is allowed under these conditions" }
+                : row with { Verdict = Verdict.NoPart, Reason = "no part fitted" };
         }
 
         if (Spec.Side == Side.Ceiling && row.Stress <= 0)
         {
-            return row with { Verdict = Verdict.NoDemand, Margin = null, MarginUnderated = null };
+            return row with { Verdict = fitted ? Verdict.NoDemand : Verdict.NoPart, Margin = null, MarginUnderated = null };
         }
 
         if (Spec.IsMatch && row.Margin >= 0)

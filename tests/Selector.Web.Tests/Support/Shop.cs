@@ -85,6 +85,7 @@ public abstract class Shop : BunitContext, IAsyncLifetime
         CapacitorFamily.EsrLow => 0.05,
         CapacitorFamily.EsrHigh => 0.03,
         CapacitorFamily.TemperatureMax => 105,
+        CapacitorFamily.Life => 5000,
         "multiplier_50" => 0.8,
         "multiplier_100" => 1,
         "multiplier_1k" => 1.2,

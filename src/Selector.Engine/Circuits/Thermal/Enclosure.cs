@@ -40,7 +40,7 @@ public readonly record struct Enclosure(double Width, double Height, double Dept
             return 0;
         }
 
-        // Without radiation the walls would be hotter than they are: from there Newton's method on a rising, convex law falls to the root.
+        // Without radiation the walls would be hotter than they are; from there Newton's method is at the root in some five steps.
         var convecting = Convecting;
         var film = Math.Pow(power / convecting, 0.8);
         var wall = film;
@@ -50,7 +50,7 @@ public readonly record struct Enclosure(double Width, double Height, double Dept
             var radiated = (Sides + Top) * Radiation(wall, ambient) * wall;
             var step = (convected + radiated - power) / ((1.25 * convected + radiated) / wall);
             wall -= step;
-            if (step <= 1e-10 * wall)
+            if (Math.Abs(step) <= 1e-12 * wall)
             {
                 break;
             }
