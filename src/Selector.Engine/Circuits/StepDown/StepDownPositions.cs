@@ -23,7 +23,7 @@ internal static class StepDownPositions
         return
         [
             new(U1, "step-down regulator", RegulatorFamily.Id, 1, Ratings(
-                (RegulatorFamily.Frequency, Frequency), (RegulatorFamily.Drop, 0), (RegulatorFamily.Resistance, 0.15 / Math.Max(1, amperes / 2)),
+                (RegulatorFamily.Frequency, Frequency), (RegulatorFamily.Drop, 0), (RegulatorFamily.InputMin, 4.5), (RegulatorFamily.Resistance, 0.15 / Math.Max(1, amperes / 2)),
                 (RegulatorFamily.LimitMax, 2 * amperes), (RegulatorFamily.OnTimeMin, 200e-9), (RegulatorFamily.Cooling, 35), (RegulatorFamily.CaseCooling, 3)))
             {
                 StandInReason = "100 kHz, limit at twice the full load",
