@@ -20,7 +20,7 @@ public sealed class MainsStage : IStage
         new(MainsFields.Low, "Mains, below", Units.Percent, new(0, 0.5), "10 %", "How far the mains may fall below nominal.") { Group = "Source", Shown = Shown },
         new(MainsFields.High, "Mains, above", Units.Percent, new(0, 0.5), "10 %", "How far the mains may rise above nominal.") { Group = "Source", Shown = Shown },
         new(MainsFields.Frequency, "Frequency", Units.Hertz, new(15, 1000), "50 Hz", "Nominal mains frequency.") { Group = "Source", Shown = Shown },
-        new(MainsFields.FrequencyTolerance, "Frequency tolerance", Units.Percent, new(0, 0.2), "1 %", "Either way.") { Group = "Source", Shown = Shown },
+        new(MainsFields.FrequencyTolerance, "Frequency, ±", Units.Percent, new(0, 0.2), "1 %", "Either way.") { Group = "Source", Shown = Shown },
         new(MainsFields.Impedance, "Mains impedance", Units.Ohm, new(0, 100), "0.5 Ω", "Of the line up to the inlet: it deepens the valley; for peaks and at switch-on it counts as none.") { Group = "Source", Shown = Shown },
         new(MainsFields.FrontEnd, "Front end", Units.One, default, MainsFields.BridgePart, "How the secondary is rectified.")
         {
