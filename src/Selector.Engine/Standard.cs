@@ -8,6 +8,7 @@ using Selector.Engine.Circuits.Mains;
 using Selector.Engine.Circuits.Output;
 using Selector.Engine.Circuits.Preload;
 using Selector.Engine.Circuits.Protection;
+using Selector.Engine.Circuits.SecondaryFuse;
 using Selector.Engine.Circuits.Series;
 using Selector.Engine.Circuits.StepDown;
 using Selector.Engine.Circuits.Terminals;
@@ -26,6 +27,7 @@ public static class Standard
             new LifeStage(),
             new InletStage(),
             new MainsStage(),
+            new SecondaryFuseStage(),
             new DirectInletStage(),
             new DirectStage(),
             new BleederStage(),

@@ -30,7 +30,7 @@ public sealed class Severity
             case Bound.Rating rating:
                 Clause = policy.Find(family.Id, technology, _spec.Kind);
                 RatingSpec = family.Rating(rating.Key);
-                Rating = Part is null ? double.NaN : Part[rating.Key];
+                Rating = fitting?.Rating(rating.Key) ?? double.NaN;
                 Fall = RatingSpec.Fall;
                 break;
             case Bound.Limit limit:

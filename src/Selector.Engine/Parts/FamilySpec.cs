@@ -22,6 +22,12 @@ public sealed record FamilySpec(string Id, string Name, string Plural, Immutable
     /// <summary>Fittings besides a single part.</summary>
     public ImmutableArray<ArrangementRule> Arrangements { get; init; } = [];
 
+    /// <summary>
+    /// What n equal parts in parallel make of a rating, as a factor by key and n, where they act as one larger part; null where the
+    /// stages reckon with the single parts themselves.
+    /// </summary>
+    public Func<string, int, double>? InParallel { get; init; }
+
     /// <summary>How the part changes over its life.</summary>
     public ImmutableArray<Drift> Ageing { get; init; } = [];
 

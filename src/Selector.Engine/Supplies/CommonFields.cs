@@ -40,6 +40,12 @@ public static class LinkNames
     /// <summary>Current from the mains, A rms.</summary>
     public const string MainsCurrent = "mains.current";
 
+    /// <summary>Current of the working winding, A rms.</summary>
+    public const string SecondaryCurrent = "secondary.current";
+
+    /// <summary>Mean current out of the reservoir, A.</summary>
+    public const string BusCurrent = "bus.current";
+
     /// <summary>Power that the regulator takes from the bus, W.</summary>
     public const string RegulatorPower = "regulator.input-power";
 

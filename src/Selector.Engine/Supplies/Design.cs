@@ -13,6 +13,9 @@ public sealed record Fitting(Part Part, ArrangementKind Kind = ArrangementKind.O
         count == 1 ? new(part) : new(part, ArrangementKind.Parallel, count);
 
     /// <summary>"one", "4 in parallel".</summary>
+    /// <summary>A rating of the whole fitting: the part's own, or what several in parallel make of it; NaN when not given.</summary>
+    public double Rating(string key) => Part[key] * (Kind == ArrangementKind.Parallel && Part.Family.InParallel is { } factor ? factor(key, Count) : 1);
+
     public string Words => Kind switch
     {
         ArrangementKind.Parallel => $"{Count} in parallel",

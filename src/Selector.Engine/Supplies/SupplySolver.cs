@@ -244,12 +244,12 @@ public sealed class SupplySolver
             return fitting?.Count ?? 1;
         }
 
-        if (fitting is not null && fitting.Part.Ratings[source.Column] is var rating && !double.IsNaN(rating))
+        var key = _model.FamilyOf(position).Ratings[source.Column].Key;
+        if (fitting?.Rating(key) is { } rating && !double.IsNaN(rating))
         {
             return rating;
         }
 
-        var key = _model.FamilyOf(position).Ratings[source.Column].Key;
         var standIn = position.StandIn.GetValueOrDefault(key, double.NaN);
         return fitting is null && !double.IsNaN(standIn) ? standIn
             : !double.IsNaN(source.Fallback) ? source.Fallback

@@ -35,6 +35,12 @@ public class StressListTests
         { "F1.breaking-current", Direct, "", "dc.resistance" },
         { "F1.melting-integral", Direct, "", "C1.capacitance" },
 
+        // F2 in the secondary or on the bus.
+        { "F2.current", Mains, "fuse.second=bus", "load.full" },
+        { "F2.voltage", Mains, "fuse.second=bus", "T1.no_load_voltage" },
+        { "F2.breaking-current", Mains, "fuse.second=bus", "C1.esr_low" },
+        { "F2.fault-current", Mains, "fuse.second=secondary", "T1.resistance" },
+
         // RT1 NTC: steady heat, joules into the reservoir, hot restart; RV1 varistor.
         { "RT1.steady-current", Mains, "inlet.limiter=ntc", "load.full" },
         { "RT1.energy", Mains, "inlet.limiter=ntc", "C1.capacitance" },

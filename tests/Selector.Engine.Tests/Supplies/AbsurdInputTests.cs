@@ -21,7 +21,7 @@ public class AbsurdInputTests
                 data.Add("dc", $"regulation={regulation};protect.output=across;case=given;sink=U1;sink.insulated=no");
                 foreach (var frontEnd in (string[])["bridge", "bridge-diodes", "centre-tap", "half-wave"])
                 {
-                    data.Add("mains", $"regulation={regulation};front-end={frontEnd};inlet.limiter=ntc;inlet.varistor=yes;hold-up=half;bleeder=resistor;sink=all;case=closed;output.adjust=adjustable;preload=resistor;protect.output=to-input;sense=bank");
+                    data.Add("mains", $"regulation={regulation};front-end={frontEnd};inlet.limiter=ntc;inlet.varistor=yes;fuse.second={(regulation == "linear" ? "bus" : "secondary")};hold-up=half;bleeder=resistor;sink=all;case=closed;output.adjust=adjustable;preload=resistor;protect.output=to-input;sense=bank");
                 }
             }
 

@@ -87,6 +87,19 @@ public class PowerPathCases
         Assert.Equal(Verdict.Holds, Row(requirement, DemoParts.Fitted(requirement).Fit("U1", new(Linear)), "U1.start-up").Verdict);
     }
 
+    // By the law of parallel branches: two equal capacitors, one at half the other's ESR, share 2 : 1; the bank bears 1.5 times one's rating.
+    [Fact]
+    public void Capacitors_in_parallel_share_by_their_resistance()
+    {
+        var requirement = Requirement.Empty.With("source", "mains");
+        var one = Row(requirement, DemoParts.Fitted(requirement), "C1.ripple-current");
+        var two = Row(requirement, DemoParts.Fitted(requirement).Fit("C1", Fitting.Parallel(DemoParts.Reservoir, 2)), "C1.ripple-current");
+
+        Assert.Equal(1.5 * one.Rating!.Value, two.Rating!.Value, 1e-9);
+        Assert.True(Row(requirement, DemoParts.Fitted(requirement).Fit("C1", Fitting.Parallel(DemoParts.Reservoir, 2)), "U1.input-least").Stress
+            > Row(requirement, DemoParts.Fitted(requirement), "U1.input-least").Stress);
+    }
+
     private static LedgerRow Row(Requirement requirement, Design design, string id) =>
         Assessor.Assess(Standard.Registry, design with { Requirement = requirement }, TestPolicy.Industrial, Budget.Standard).Rows.Single(r => r.Id == id);
 

@@ -108,7 +108,7 @@ internal sealed class DirectModel : ReservoirModel
         links[_mean] = links[_max] = links[_min] = bus;
         if (!stresses.IsEmpty)
         {
-            WriteReservoir(inputs, stresses, bus, 0, 0);
+            WriteReservoir(inputs, stresses, bus, 0, 0, 0);
         }
 
         return SolveStatus.Solved;

@@ -25,7 +25,7 @@ internal sealed class MainsModel : ReservoirModel
     private readonly int _loss;
     private readonly int _start;
     private readonly int _slope;
-    private readonly int _current, _winding, _transformerLoss, _slopeOfLoss;
+    private readonly int _secondary, _busCurrent, _current, _winding, _transformerLoss, _slopeOfLoss;
     private readonly MainsStresses _stress;
 
     public MainsModel(RequirementValues r)
@@ -46,6 +46,8 @@ internal sealed class MainsModel : ReservoirModel
         _loss = Write(new(LinkNames.Loss(topology.Rectifier), Units.Watt, 0.5, [.. MainsStresses.CurrentOn(topology, DrawLink)]));
         _start = Write(new("rectifier.start", Units.Volt, 0) { Others = Push.None, IsHint = true });
         _slope = Write(new("rectifier.slope", Units.One, 0) { Others = Push.None, IsHint = true });
+        _secondary = Write(new(LinkNames.SecondaryCurrent, Units.Ampere, 1, [.. MainsStresses.CurrentOn(topology, DrawLink)]));
+        _busCurrent = Write(new(LinkNames.BusCurrent, Units.Ampere, 1, [.. MainsStresses.CurrentOn(topology, DrawLink)]));
         _current = Write(new(LinkNames.MainsCurrent, Units.Ampere, 0.1, [.. MainsStresses.CurrentOn(topology, DrawLink)]));
         _winding = Write(new(LinkNames.Temperature(T1), Units.Celsius, 60, [.. MainsStresses.CurrentOn(topology, DrawLink)]));
         _transformerLoss = Write(new(LinkNames.Loss(T1), Units.Watt, 1, [.. MainsStresses.CurrentOn(topology, DrawLink)]));
@@ -113,6 +115,8 @@ internal sealed class MainsModel : ReservoirModel
         links[_slope] = double.IsFinite(s.Next.Slope) ? s.Next.Slope : 0;
         links[_mean] = s.BusMean;
         links[_loss] = s.DiodeLoss * _topology.DiodesInPart;
+        links[_secondary] = s.SecondaryRms;
+        links[_busCurrent] = s.LoadMean;
         links[_current] = _in.PrimaryCurrent(inputs, transformer, _topology, s.SecondaryRms);
         (links[_transformerLoss], links[_winding]) = _in.Heat(inputs, transformer, s.WindingLoss);
         links[_slopeOfLoss] = Math.Max(0, _in.Drift(inputs)) * s.DiodeAverage * _topology.DiodesInPart;
@@ -121,7 +125,7 @@ internal sealed class MainsModel : ReservoirModel
             // No loop runs through the extremes of the bus: they are only asked for once the loops are closed.
             links[_max] = s.BusMax;
             links[_min] = s.BusMin;
-            WriteReservoir(inputs, stresses, s.BusMax, s.CapacitorRms, _topology.PulsesPerCycle * circuit.Frequency);
+            WriteReservoir(inputs, stresses, s.BusMax, s.CapacitorRms, s.CapacitorFundamentalRms, _topology.PulsesPerCycle * circuit.Frequency);
             _stress.Write(inputs, stresses, _in, s, links[_winding]);
         }
 

@@ -9,9 +9,6 @@ namespace Selector.Engine.Circuits.Reservoir;
 /// <summary>What an electrolytic brings into any stage that holds one: its axes, and its values at a condition.</summary>
 public static class ReservoirCapacitor
 {
-    /// <summary>Share of the greatest ESR that a new, warm part may have. Common practice, no source.</summary>
-    private const double LeastEsr = 0.5;
-
     private static readonly double AgedCapacitance = Aged(CapacitorFamily.Capacitance);
     private static readonly double AgedEsr = Aged(CapacitorFamily.EsrLow);
 
@@ -37,7 +34,7 @@ public static class ReservoirCapacitor
     /// <param name="greatest">As the data sheet limits it, ohm.</param>
     /// <param name="place">0 for new and warm, 1 for aged.</param>
     public static double Esr(double greatest, double place) =>
-        greatest * new Interval(LeastEsr, AgedEsr).At(place);
+        greatest * new Interval(CapacitorFamily.LeastOverGreatestEsr, AgedEsr).At(place);
 
     /// <summary>The same at a temperature.</summary>
     /// <param name="greatest">As the data sheet limits it, ohm.</param>

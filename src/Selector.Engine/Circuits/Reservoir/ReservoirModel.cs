@@ -66,7 +66,7 @@ public abstract class ReservoirModel : StageModel
             On = VoltageOn,
             Others = Others,
         });
-        _ripple = Stress(new(C1, "ripple-current", "ripple current, weighted", Units.Ampere, Side.Ceiling, new Bound.Rating(CapacitorFamily.Ripple), "I = √( (I_low / m(f_low))² + (I_sw / m(f_sw))² )")
+        _ripple = Stress(new(C1, "ripple-current", "ripple current, weighted", Units.Ampere, Side.Ceiling, new Bound.Rating(CapacitorFamily.Ripple), "I = √( (I_1 / m(f))² + (I_above / m(2 f))² + (I_sw / m(f_sw))² )")
         {
             Needs = [ReservoirCapacitor.RippleTable(C1, lowestKey, lowestFrequency)],
             On = RippleOn,
@@ -130,11 +130,11 @@ public abstract class ReservoirModel : StageModel
         ReservoirCapacitor.Esr(inputs[_esr], inputs[_esrPlace], inputs[_esrCold], inputs[_air] + _localRise);
 
     /// <summary>Writes the stresses of C1.</summary>
-    protected void WriteReservoir(ReadOnlySpan<double> inputs, Span<double> stresses, double busMax, double lowRipple, double lowFrequency)
+    protected void WriteReservoir(ReadOnlySpan<double> inputs, Span<double> stresses, double busMax, double lowRipple, double fundamental, double lowFrequency)
     {
         var table = inputs.Slice(_firstMultiplier, FrequencyMultiplier.Keys.Length);
         stresses[_voltage] = busMax;
-        stresses[_ripple] = RippleWeight.Equivalent(table, lowRipple, lowFrequency, inputs[RippleIn], inputs[FrequencyIn]);
+        stresses[_ripple] = RippleWeight.Equivalent(table, lowRipple, fundamental, lowFrequency, inputs[RippleIn], inputs[FrequencyIn]);
         stresses[_life] = ElectrolyticLife.Hours(
             inputs[_lifeRated], inputs[_lifeAt], inputs[_rippleRise], inputs[_air] + _localRise, inputs[_rippleRated] > 0 ? stresses[_ripple] / inputs[_rippleRated] : 1);
         stresses[_temperature] = inputs[_air] + _localRise;

@@ -19,6 +19,24 @@ public static class RippleWeight
         return Math.Sqrt(a * a + b * b);
     }
 
+    /// <summary>
+    /// Equivalent of a rectifier's and a converter's current in one reservoir: the line at the ripple frequency with its own multiplier,
+    /// all above it as if it stood at twice that frequency, the converter's at its own. Multipliers rise with frequency, so that
+    /// nothing is taken too lightly.
+    /// </summary>
+    /// <param name="table">As above.</param>
+    /// <param name="low">All of the rectifier's current, A rms.</param>
+    /// <param name="fundamental">Its component at the ripple frequency, A rms.</param>
+    /// <param name="ripple">Ripple frequency, Hz.</param>
+    /// <param name="high">The converter's current, A rms.</param>
+    /// <param name="switching">Hz.</param>
+    public static double Equivalent(ReadOnlySpan<double> table, double low, double fundamental, double ripple, double high, double switching)
+    {
+        var above = Math.Sqrt(Math.Max(0, low * low - fundamental * fundamental));
+        var (a, b, c) = (Weighted(table, Math.Min(low, fundamental), ripple), Weighted(table, above, 2 * ripple), Weighted(table, high, switching));
+        return Math.Sqrt(a * a + b * b + c * c);
+    }
+
     private static double Weighted(ReadOnlySpan<double> table, double current, double frequency)
     {
         if (current <= 0 || frequency <= 0)

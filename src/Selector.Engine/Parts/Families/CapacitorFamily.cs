@@ -22,6 +22,12 @@ public static class CapacitorFamily
     public const string EsrCold = "esr_cold";
     public const string RippleRise = "ripple_rise";
 
+    /// <summary>ESR of a good part over the greatest that the sheet allows. Common practice, no source.</summary>
+    public const double LeastOverGreatestEsr = 0.5;
+
+    /// <summary>More cans than this are a different design.</summary>
+    private const int MostInParallel = 2;
+
     public static FamilySpec Spec { get; } = new(Id, "electrolytic capacitor", "electrolytic capacitors",
     [
         new(Capacitance, "capacitance", Units.Farad, new(1e-8, 10), "Nominal, at 100 or 120 Hz.") { Required = true, InDescription = true },
@@ -42,6 +48,16 @@ public static class CapacitorFamily
     ])
     {
         Technologies = ["aluminium electrolytic"],
+        Arrangements = [new(ArrangementKind.Parallel, MostInParallel)],
+        InParallel = (key, n) => key switch
+        {
+            Capacitance => n,
+            EsrLow or EsrHigh or Esl => 1.0 / n,
+
+            // The one with the least ESR carries most: beside others of the greatest it has twice their share.
+            Ripple => 1 + (n - 1) * LeastOverGreatestEsr,
+            _ => 1,
+        },
         Checks =
         [
             new([Surge, Voltage], v => v[0] >= v[1], "The surge voltage is below the rated voltage: check both."),
