@@ -44,6 +44,9 @@ public sealed class TypedPartTests : Shop
     {
         var sheet = Sheet(number);
         sheet.Find($"{Row} button").Click();
+
+        // Once the candidates are there nothing draws the row anew while its boxes are being filled.
+        sheet.WaitForElement("[data-count=candidates]", Patience);
         sheet.WaitForElement(".part-form", Patience);
         return sheet;
     }

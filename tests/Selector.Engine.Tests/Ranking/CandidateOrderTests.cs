@@ -100,6 +100,11 @@ public class CandidateOrderTests
     private static Part Reservoir(string code, double volts) =>
         (DemoParts.Reservoir with { OrderingCode = code }).With(CapacitorFamily.Voltage, volts);
 
-    private static Engine.Ranking.Ranking Rank(string position, params Part[] parts) => Engine.Ranking.Ranker.Rank(
-        Model, DemoParts.Fitted(Requirement.Empty).Fittings, position, parts, TestPolicy.Industrial, CancellationToken.None);
+    /// <summary>The parts one by one; pairs in parallel are tried elsewhere.</summary>
+    private static Engine.Ranking.Ranking Rank(string position, params Part[] parts)
+    {
+        var ranking = Engine.Ranking.Ranker.Rank(
+            Model, DemoParts.Fitted(Requirement.Empty).Fittings, position, parts, TestPolicy.Industrial, CancellationToken.None);
+        return ranking with { Candidates = [.. ranking.Candidates.Where(c => c.Fitting.Count == 1)] };
+    }
 }

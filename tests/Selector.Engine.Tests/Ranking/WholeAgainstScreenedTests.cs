@@ -68,7 +68,7 @@ public class WholeAgainstScreenedTests
             }
         }
 
-        Assert.True(holding >= 1 && holding < parts.Count, $"{holding} hold: " + string.Join("; ", ranking.Candidates.Take(5).Select(c => c.Reason)));
+        Assert.True(holding >= 1 && holding < ranking.Candidates.Length, $"{holding} hold: " + string.Join("; ", ranking.Candidates.Take(5).Select(c => c.Reason)));
     }
 
     /// <summary>The part with every rating varied, so that some hold and some do not.</summary>
