@@ -7,6 +7,7 @@ using Selector.Application.Supplies;
 using Selector.Engine.Parts;
 using Selector.Engine.Supplies;
 using Selector.Storage;
+using Selector.Storage.Entities;
 
 namespace Selector.Application;
 
@@ -28,9 +29,11 @@ public sealed class StoreStart(IStoreMigrator migrator, StoreWork store, Registr
 
     internal async Task<StartReport> Prepare(ImmutableArray<(string Name, string Text)> catalogue, CancellationToken cancel)
     {
-        await migrator.Migrate(cancel).ConfigureAwait(false);
+        // Reading the files needs no store: it runs beside the migration.
         var warnings = ImmutableArray.CreateBuilder<string>();
-        var files = Read(catalogue, warnings);
+        var reading = Task.Run(() => Read(catalogue, warnings), cancel);
+        await migrator.Migrate(cancel).ConfigureAwait(false);
+        var files = await reading.ConfigureAwait(false);
         return await store.Write(
             async (context, token) =>
             {
@@ -69,17 +72,17 @@ public sealed class StoreStart(IStoreMigrator migrator, StoreWork store, Registr
         SelectorContext context, List<(FamilySpec Family, ImmutableArray<Part> Parts)> files, CancellationToken cancel)
     {
         var now = time.GetUtcNow().UtcDateTime;
-        foreach (var (family, parts) in files)
-        {
-            context.Parts.AddRange(parts.Select(PartRows.Row));
-        }
+        // A new store: numbers are given here, which saves asking it for each of them.
+        var number = 0;
+        var numbered = files.Select(f => (f.Family, Parts: f.Parts.Select(p => p with { Id = ++number }).ToImmutableArray())).ToList();
+        context.ChangeTracker.AutoDetectChangesEnabled = false;
+        context.Parts.AddRange(numbered.SelectMany(f => f.Parts).Select(Numbered));
+        context.ChangeTracker.AutoDetectChangesEnabled = true;
 
         await new CatalogueWriter(context, now, cancel).Count().ConfigureAwait(false);
         await context.SaveChangesAsync(cancel).ConfigureAwait(false);
 
-        var rows = await context.Parts.AsNoTracking().OrderBy(p => p.Id).ToListAsync(cancel).ConfigureAwait(false);
-        var snapshot = new CatalogueSnapshot(1, rows.GroupBy(r => r.Family, StringComparer.Ordinal).ToFrozenDictionary(
-            g => g.Key, g => g.Select(r => PartRows.Part(r, registry.Family(r.Family))).ToImmutableArray(), StringComparer.Ordinal));
+        var snapshot = new CatalogueSnapshot(1, numbered.ToFrozenDictionary(f => f.Family.Id, f => f.Parts, StringComparer.Ordinal));
         var missing = new List<string>();
         var editor = new SupplyEditor(context, registry, now, cancel);
         foreach (var example in examples.Examples)
@@ -90,5 +93,12 @@ public sealed class StoreStart(IStoreMigrator migrator, StoreWork store, Registr
         }
 
         return missing;
+    }
+
+    private static PartRecord Numbered(Part part)
+    {
+        var row = PartRows.Row(part);
+        row.Id = part.Id;
+        return row;
     }
 }
