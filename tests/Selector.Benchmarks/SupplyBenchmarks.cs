@@ -20,7 +20,7 @@ public class SupplyBenchmarks
     private SupplyModel _model = null!;
     private Design _design = null!;
 
-    [Params("fixture-5v", "bench-9v")]
+    [Params("fixture-5v", "bench-9v", "bench-3-18v", "instrument-12v")]
     public string Example { get; set; } = "";
 
     [GlobalSetup]
