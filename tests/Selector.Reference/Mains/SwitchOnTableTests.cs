@@ -44,6 +44,20 @@ public class SwitchOnTableTests
         }
     }
 
+    // Computed with ngspice 39 for this test, maximum step 1 µs: both halves of a centre tap with leakage, which hand over to each other
+    // while the reservoir is empty; 30 degrees, 1.5 A drawn in proportion below 5 V.
+    [Fact]
+    public void Both_halves_of_a_centre_tap_may_conduct_at_once()
+    {
+        var circuit = new RectifierCase(RectifierArrangement.CentreTap, 50, 12, 0.4, 1.2e-3, 0.7, 0.05, 10e-3, 0.05, LoadKind.Current, 1.5);
+
+        Assert.Equal(SolveStatus.Solved, SwitchOnSolver.Solve(new SwitchOnCase(circuit, 30 * Degree, 5), [], Budget.Standard, out var s));
+
+        Assert.Equal(20.54841, s.GreatestPeak, 2e-4);
+        Assert.Equal(4.335532e-3, s.FirstPeakAt, 1e-6);
+        Assert.Equal(1.74801, s.FirstHalfIntegral, 2e-5);
+    }
+
     // Practice case 9, computed by hand: 17 V over 5 + 0.5 ohm cold, over 0.25 + 0.5 ohm restarted hot, no leakage.
     [Theory]
     [InlineData(5.0, 3.09)]
